@@ -1,0 +1,2 @@
+/** The program's version, as printed on the fill sheet. */
+export function programVersion(): string;

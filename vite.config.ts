@@ -1,0 +1,27 @@
+import react from '@vitejs/plugin-react';
+import { defineConfig } from 'vitest/config';
+import { programVersion } from './.ci/lib/project.mjs';
+import { offline } from './.ci/vite/offline.ts';
+import { contentPolicy, policyHeaders } from './.ci/vite/policy.ts';
+
+export default defineConfig({
+  // Relative addresses, so that the built folder works under any path of a server.
+  base: './',
+  plugins: [react(), contentPolicy(), offline()],
+  define: { __PROGRAM_VERSION__: JSON.stringify(programVersion()) },
+  build: {
+    target: 'es2023',
+    sourcemap: true,
+    // The size check follows the imports it lists.
+    manifest: true,
+    // Inlined files would be data addresses, which the content policy forbids for scripts and styles.
+    assetsInlineLimit: 0,
+  },
+  worker: { format: 'es' },
+  preview: { headers: policyHeaders },
+  test: {
+    include: ['tests/**/*.test.ts', 'tests/**/*.test.tsx'],
+    exclude: ['tests/journeys/**'],
+    environment: 'node',
+  },
+});
