@@ -1,0 +1,32 @@
+import { fail, ok, type Outcome } from '../../../units/index.ts';
+import type { FileProblem } from './problem.ts';
+
+/**
+ * Steps from one version of the recipe to the next, by the version they start
+ * from. A step passes through what it does not understand: the schema of the
+ * newest version judges the result.
+ */
+export type Migrations = Readonly<Record<number, (old: unknown) => unknown>>;
+
+/** No version before the present one was ever released. */
+export const migrations: Migrations = {};
+
+/**
+ * Takes the recipe part of a file from `version` to `newest`, one step at a time.
+ * Fails with `newer-version` or, when a step is missing, `no-migration`.
+ */
+export function migrate(
+  recipe: unknown,
+  version: number,
+  newest: number,
+  steps: Migrations,
+): Outcome<unknown, FileProblem> {
+  if (version > newest) return fail({ code: 'newer-version', version, newest });
+  let migrated = recipe;
+  for (let from = version; from < newest; from += 1) {
+    const step = Object.hasOwn(steps, from) ? steps[from] : undefined;
+    if (step === undefined) return fail({ code: 'no-migration', version: from });
+    migrated = step(migrated);
+  }
+  return ok(migrated);
+}
