@@ -1,0 +1,37 @@
+/**
+ * Inert gases and their coefficient of nitrogen equivalency Kk, ISO 10156:2017
+ * Table 1 (seen). `listed: null` is a gas that the table does not name: there
+ * `polyatomicDefault` is the table's own note for gases of three or more atoms.
+ */
+export interface InertRow {
+  readonly gas: string;
+  readonly listed: number | null;
+}
+
+const rows: readonly InertRow[] = [
+  { gas: 'nitrogen', listed: 1 },
+  { gas: 'carbon dioxide', listed: 1.5 },
+  { gas: 'helium', listed: 0.9 },
+  { gas: 'argon', listed: 0.55 },
+  { gas: 'neon', listed: 0.7 },
+  { gas: 'krypton', listed: 0.5 },
+  { gas: 'xenon', listed: 0.5 },
+  { gas: 'water', listed: null },
+];
+
+/** Note of Table 1: other non-flammable gases of three or more atoms. */
+export const polyatomicDefault = 1.5;
+
+/**
+ * What stands in for a missing Kk when a limit is judged: the lowest of the
+ * table, because a weaker inert makes a mixture look both more flammable and
+ * more oxidising.
+ */
+export const cautiousEquivalency = Math.min(...rows.map((row) => row.listed ?? Infinity));
+
+const byGas: ReadonlyMap<string, InertRow> = new Map(rows.map((row) => [row.gas, row]));
+
+/** The row of an inert gas, or undefined when the gas is not in the table. */
+export function inertRow(gas: string): InertRow | undefined {
+  return byGas.get(gas);
+}

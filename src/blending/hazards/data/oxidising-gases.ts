@@ -1,0 +1,24 @@
+import type { Trust } from '../finding.ts';
+
+/**
+ * Oxidising gases and their coefficient of oxygen equivalency Ci, ISO 10156:2017
+ * clause 5. Another gas is another row; nitrous oxide is here because the
+ * published example of the Globally Harmonized System needs it.
+ */
+export interface OxidiserRow {
+  readonly gas: string;
+  readonly coefficient: number;
+  readonly trust: Trust;
+}
+
+const rows: readonly OxidiserRow[] = [
+  { gas: 'oxygen', coefficient: 1, trust: 'seen' },
+  { gas: 'nitrous oxide', coefficient: 0.6, trust: 'seen' },
+];
+
+const byGas: ReadonlyMap<string, OxidiserRow> = new Map(rows.map((row) => [row.gas, row]));
+
+/** The row of an oxidising gas, or undefined when the gas is not in the table. */
+export function oxidiserRow(gas: string): OxidiserRow | undefined {
+  return byGas.get(gas);
+}

@@ -1,0 +1,77 @@
+import type { RangeVerdict } from '../../../thermo/index.ts';
+import { compositionWords as words } from '../../messages/hazards.ts';
+import type { UncheckedPlan } from '../../plan/plan.ts';
+import type { Finding, FindingPlace } from '../finding.ts';
+import { finding } from '../rule.ts';
+import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
+
+const rangeCard: RuleCard = {
+  id: 'model-range',
+  title: 'Range of the gas model',
+  source: 'Kunz and Wagner, J. Chem. Eng. Data 57 (2012) 3032: normal 90 to 450 K up to 35 MPa, extended 60 to 700 K up to 70 MPa',
+  edition: 'GERG-2008; range text from memory',
+  trust: 'from memory',
+};
+
+const pairsCard: RuleCard = {
+  id: 'estimated-pairs',
+  title: 'Pairs of gases without measurements behind them',
+  source: 'Kunz and Wagner, J. Chem. Eng. Data 57 (2012) 3032, Table A8',
+  edition: 'GERG-2008',
+  trust: 'seen',
+};
+
+/** Content of both gases above which an estimated pair is worth a caution (own choice). */
+const matters = 0.01;
+/** Content of either gas up to which a pair cannot move a stop (own choice). */
+const immaterial = 1e-5;
+/** So many pairs are named; a long list would hide the rest. */
+const namedPairs = 4;
+
+/** States outside the range that the authors of the equation give. */
+export const modelRange: HazardRule = { ...rangeCard, judge: judgeRange };
+
+/** Pairs that are present and were estimated rather than fitted. */
+export const estimatedPairs: HazardRule = { ...pairsCard, judge: judgePairs };
+
+function judgeRange({ plan }: HazardContext): readonly Finding[] {
+  const states: { place: FindingPlace; where: string; range: RangeVerdict }[] = [];
+  if (plan.start) states.push({ place: { kind: 'cylinder' }, where: 'before filling', range: plan.start.range });
+  for (const { number, state } of plan.steps) {
+    states.push({ place: { kind: 'step', step: number }, where: `after step ${number}`, range: state.range });
+  }
+  states.push({ place: { kind: 'finished gas' }, where: 'for the finished gas', range: plan.finished.range });
+  return states.flatMap(({ place, where, range }) => {
+    if (range === 'normal') return [];
+    const outside = range === 'outside';
+    return [finding(rangeCard, {
+      verdict: outside ? 'caution' : 'note',
+      place,
+      words: outside ? words.outsideRange(where) : words.extendedRange(where),
+      figure: `${range} range`,
+      limit: 'normal range',
+    })];
+  });
+}
+
+function judgePairs({ plan }: HazardContext): readonly Finding[] {
+  const content = (gas: string): number => plan.finished.fractions[(plan.job.gases as readonly string[]).indexOf(gas)] ?? 0;
+  const smaller = ([a, b]: UncheckedPlan['estimatedPairs'][number]): number => Math.min(content(a), content(b));
+  const important = plan.estimatedPairs.filter((pair) => smaller(pair) > matters);
+  const minor = plan.estimatedPairs.filter((pair) => smaller(pair) > immaterial && smaller(pair) <= matters);
+  return [...pairFinding(important, true), ...pairFinding(minor, false)];
+}
+
+function pairFinding(pairs: UncheckedPlan['estimatedPairs'], important: boolean): readonly Finding[] {
+  if (pairs.length === 0) return [];
+  const named = pairs.slice(0, namedPairs).map(([a, b]) => `${a} with ${b}`).join(', ');
+  const list = pairs.length > namedPairs ? `${named} and ${pairs.length - namedPairs} more` : named;
+  return [finding(pairsCard, {
+    verdict: important ? 'caution' : 'note',
+    place: { kind: 'finished gas' },
+    about: important ? 'main' : 'minor',
+    words: words.estimatedPairs(list, important),
+    figure: `${pairs.length} estimated`,
+    limit: 'all pairs fitted',
+  })];
+}

@@ -1,0 +1,71 @@
+import { pressureWords as words } from '../../messages/hazards.ts';
+import type { Finding } from '../finding.ts';
+import { celsiusToKelvin, developedPressure, exceeds, gaugeShare } from '../pressure-limits.ts';
+import { finding, NOT_COMPUTED } from '../rule.ts';
+import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
+import { gaugeOfFinish, showPressure } from '../show.ts';
+
+const developedCard: RuleCard = {
+  id: 'test-pressure',
+  title: 'Developed pressure at 65 °C against the test pressure',
+  source: 'UN Model Regulations, packing instruction P200',
+  edition: 'from memory',
+  trust: 'from memory',
+};
+
+const settledCard: RuleCard = {
+  id: 'two-thirds-of-test-pressure',
+  title: 'Settled pressure at 15 °C against two thirds of the test pressure',
+  source: 'UN Model Regulations, packing instruction P200 (3)(a)',
+  edition: 'from memory',
+  trust: 'from memory',
+};
+
+const place = { kind: 'cylinder' } as const;
+
+/** The finished cylinder heated to 65 °C must not develop more than its test pressure. */
+export const testPressure: HazardRule = { ...developedCard, judge: judgeDeveloped };
+
+/** UN rule for compressed gas: settled pressure up to two thirds of the test pressure, both gauge. */
+export const twoThirdsOfTestPressure: HazardRule = { ...settledCard, judge: judgeSettled };
+
+function judgeDeveloped(context: HazardContext): readonly Finding[] {
+  const { plan } = context;
+  const limit = plan.job.cylinder.testPressure;
+  if (limit === null) {
+    return [finding(developedCard, { verdict: 'caution', place, words: words.testPressureNotStated(), figure: NOT_COMPUTED, limit: 'not stated' })];
+  }
+  const gauge = gaugeOfFinish(plan);
+  const shownLimit = showPressure(plan, limit, gauge);
+  const pressure = developedPressure(context, celsiusToKelvin(65));
+  if (!pressure.ok) {
+    const text = words.pressureNotComputed('Pressure', '65 °C', pressure.reason.code);
+    return [finding(developedCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
+  }
+  const figure = showPressure(plan, pressure.value, gauge);
+  const above = exceeds(pressure.value, limit);
+  return [finding(developedCard, {
+    verdict: above ? 'hold' : 'note',
+    place,
+    words: above ? words.aboveTestPressure(figure, shownLimit) : words.withinTestPressure(figure, shownLimit),
+    figure,
+    limit: shownLimit,
+  })];
+}
+
+function judgeSettled(context: HazardContext): readonly Finding[] {
+  const { plan } = context;
+  const test = plan.job.cylinder.testPressure;
+  if (test === null) return [];
+  const gauge = gaugeOfFinish(plan);
+  const limit = gaugeShare(test, 2 / 3, plan.job.conditions.barometer);
+  const shownLimit = showPressure(plan, limit, gauge);
+  const pressure = developedPressure(context, celsiusToKelvin(15));
+  if (!pressure.ok) {
+    const text = words.pressureNotComputed('Settled pressure', '15 °C', pressure.reason.code);
+    return [finding(settledCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
+  }
+  if (!exceeds(pressure.value, limit)) return [];
+  const figure = showPressure(plan, pressure.value, gauge);
+  return [finding(settledCard, { verdict: 'caution', place, words: words.aboveTwoThirds(figure, shownLimit), figure, limit: shownLimit })];
+}

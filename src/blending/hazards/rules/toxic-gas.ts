@@ -1,0 +1,52 @@
+import { formatNumber } from '../../../units/index.ts';
+import { classWords as words } from '../../messages/hazards.ts';
+import { toxicRow } from '../data/toxic-gases.ts';
+import type { Finding } from '../finding.ts';
+import { finding } from '../rule.ts';
+import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
+import { showFraction } from '../show.ts';
+import { mixtureLc50 } from '../toxicity.ts';
+
+const card: RuleCard = {
+  id: 'toxic-gas',
+  title: 'Toxic components and LC50 of the finished gas',
+  source: 'ISO 10298; UN Model Regulations 2.2.3 (toxic up to 5000 µmol/mol)',
+  edition: 'LC50 figures from memory; threshold seen in ADR 2.2.2.1.5',
+  trust: 'from memory',
+};
+
+/** Content of a toxic gas up to which it is a trace, worth a note if ordered, else nothing (own choice). */
+const trace = 1e-6;
+const toxicUpTo = 5000;
+const highlyToxicUpTo = 200;
+
+/** Names toxic gases with their LC50 and that of the mixture. */
+export const toxicGas: HazardRule = { ...card, judge };
+
+function judge({ plan }: HazardContext): readonly Finding[] {
+  const { gases } = plan.job;
+  const x = plan.finished.fractions;
+  const mixture = mixtureLc50(gases, x);
+  if (mixture === null) return [];
+  const ordered = new Set(plan.job.order.components.map((component) => component.gas));
+  const present = gases.flatMap((gas, i) => {
+    const row = toxicRow(gas);
+    const content = x[i] ?? 0;
+    return row && (ordered.has(i) ? content > 0 : content > trace) ? [{ gas, content, lc50: row.lc50 }] : [];
+  });
+  const list = present.map((each) => `${each.gas} ${showFraction(each.content)} (LC50 ${each.lc50} µmol/mol)`).join('; ');
+  if (present.length === 0) return [];
+  // An LC50 above 1 mol/mol means that no exposure to the mixture reaches it in an hour.
+  const figure = mixture > 1e6 ? 'LC50 above 1 000 000 µmol/mol' : `LC50 ${formatNumber(mixture, 0)} µmol/mol`;
+  const place = { kind: 'finished gas' } as const;
+  const limit = `${toxicUpTo} µmol/mol`;
+  if (present.every((each) => each.content < trace)) {
+    return [finding(card, { verdict: 'note', place, words: words.toxicTrace(figure, list), figure, limit })];
+  }
+  const meaning = mixture <= highlyToxicUpTo
+    ? 'Highly toxic by transport rules.'
+    : mixture <= toxicUpTo
+      ? 'Toxic by transport rules.'
+      : 'Not classed as toxic for transport, but dangerous to breathe.';
+  return [finding(card, { verdict: 'caution', place, words: words.toxicMixture(figure, list, meaning), figure, limit })];
+}

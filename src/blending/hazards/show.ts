@@ -1,0 +1,66 @@
+import {
+  formatAmountFraction, formatNumber, formatPressureInFull, formatSignificant, fraction, fromPascal, toPascal,
+} from '../../units/index.ts';
+import type { Pascal, PressureReference, PressureScale, PressureUnit } from '../../units/index.ts';
+import type { UncheckedPlan } from '../plan/plan.ts';
+
+/** Step to which a pressure is shown when the gauge is not finer. */
+const ordinaryStep: Partial<Record<PressureUnit, number>> = {
+  psi: 1, kPa: 10, MPa: 0.01, Pa: 10_000, hPa: 100, mbar: 100, Torr: 100, mmHg: 100,
+};
+
+/** Gauge of a step; a plan without one for it shows bar gauge. */
+export function gaugeOfStep(plan: UncheckedPlan, step: number): string | null {
+  return plan.steps[step - 1]?.gauge ?? null;
+}
+
+/** Gauge on which the finished cylinder is read. */
+export function gaugeOfFinish(plan: UncheckedPlan): string | null {
+  return plan.steps.at(-1)?.gauge ?? null;
+}
+
+/**
+ * An absolute pressure with number, unit and reference, in the terms of a gauge
+ * of the recipe or in bar gauge. `reference` overrules the gauge's own, for
+ * partial pressures, which have no gauge form.
+ */
+export function showPressure(
+  plan: UncheckedPlan, pressure: Pascal, gaugeKey: string | null, reference?: PressureReference,
+): string {
+  const gauge = plan.job.gauges.find((each) => each.key === gaugeKey);
+  const unit = gauge?.unit ?? 'bar';
+  const scale: PressureScale = {
+    unit,
+    reference: reference ?? gauge?.reference ?? 'gauge',
+    barometer: plan.job.conditions.barometer,
+  };
+  const shown = Math.abs(scale.reference === 'gauge' ? pressure - scale.barometer : pressure);
+  let ordinary: number = toPascal(ordinaryStep[unit] ?? 0.1, unit);
+  // Small pressures keep about three digits.
+  for (let finer = 0; finer < 4 && shown < 100 * ordinary; finer += 1) ordinary /= 10;
+  const resolution = gauge && gauge.resolution > 0 && gauge.resolution < ordinary ? gauge.resolution : ordinary;
+  return formatPressureInFull(pressure, { ...scale, resolution });
+}
+
+/** A pressure difference or the size of a step, Pa, in the unit of a gauge; it needs no reference. */
+export function showDifference(plan: UncheckedPlan, difference: number, gaugeKey: string | null): string {
+  const unit = plan.job.gauges.find((each) => each.key === gaugeKey)?.unit ?? 'bar';
+  return `${formatSignificant(fromPascal(difference, unit), 3)} ${unit} difference`;
+}
+
+/** A fraction as percent, `23.5 %`; small ones to two digits. */
+export function showPercent(value: number, decimals = 1): string {
+  const percent = value * 100;
+  return `${Math.abs(percent) >= 1 || percent === 0 ? formatNumber(percent, Math.abs(percent) >= 100 ? 0 : decimals) : formatSignificant(percent, 2)} %`;
+}
+
+/** An amount fraction in the unit that suits its size. */
+export function showFraction(value: number): string {
+  const { number, unit } = formatAmountFraction(fraction(value), 3);
+  return `${number} ${unit}`;
+}
+
+/** A bare figure such as the ISO 10156 sum, to two decimals, more when it is small. */
+export function showFigure(value: number): string {
+  return Math.abs(value) >= 0.1 || value === 0 ? formatNumber(value, 2) : formatSignificant(value, 2);
+}

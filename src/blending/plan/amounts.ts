@@ -1,0 +1,203 @@
+import { cubicMetre, fail, mole, ok, pascal } from '../../units/index.ts';
+import type { Kelvin, Mole, Outcome, Pascal } from '../../units/index.ts';
+import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
+import type { Job } from '../recipe/job.ts';
+import { cylinderVolume, settle, totalAmount } from '../steps/cylinder.ts';
+import type { Vessel } from '../steps/cylinder.ts';
+import { nonNegativeLeastSquares } from './least-squares.ts';
+
+/** What goes in from each parent, and what was there before. */
+export interface FillAmounts {
+  /** mol from each parent, aligned with `Job.parents`. */
+  readonly additions: readonly number[];
+  /** mol of each gas left in the cylinder before the first addition, aligned with `Job.gases`. */
+  readonly residual: Float64Array;
+  /** mol of each gas in the finished cylinder. */
+  readonly finished: Float64Array;
+  readonly total: Mole;
+}
+
+/** The closest that these parents come to the order. */
+export interface NearestBlend {
+  /** Amount fractions, aligned with `Job.gases`. */
+  readonly fractions: Float64Array;
+}
+
+/** Why no amounts meet the order. */
+export type AmountProblem =
+  | { readonly code: 'component-without-parent'; readonly gases: readonly number[]; readonly nearest: NearestBlend }
+  | { readonly code: 'cannot-be-made'; readonly gases: readonly number[]; readonly nearest: NearestBlend }
+  /** The residual holds too much of something; `ventTo` (absolute) would do, null: evacuate. */
+  | { readonly code: 'residual-in-the-way'; readonly gases: readonly number[]; readonly ventTo: Pascal | null; readonly nearest: NearestBlend }
+  | { readonly code: 'fill-pressure-too-low'; readonly residualPressure: Pascal }
+  | { readonly code: 'state'; readonly where: 'residual' | 'finished gas'; readonly reason: ThermoReason };
+
+/** An ordered fraction counts as met within this relative distance. */
+const MET = 1e-9;
+/** How far the balance may fall short, relative, for gases that nobody ordered, when its line states no tolerance (our own choice). */
+const BALANCE_MET = 0.02;
+/** Weight of "bring nothing that was not ordered" beside the fractions: enough to choose, too little to bend them. */
+const PURITY_WEIGHT = 1e-5;
+/** Rounds in which total amount and final composition must agree; three or four are usual. */
+const MAXIMUM_ROUNDS = 40;
+
+/**
+ * Amounts of the parents that make the ordered composition at the fill
+ * pressure: Σₛ yₛᵢ nₛ + rᵢ = N xᵢ for every ordered component, with nₛ ≥ 0 and
+ * N = ρ(T, p, x) V(p, T). What impurities bring counts in N and is left to the
+ * plan to report.
+ */
+export function solveAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<FillAmounts, AmountProblem> {
+  const { fillPressure, fillTemperature } = job.order;
+  const residual = residualAmounts(job, model, vessel);
+  if (!residual.ok) return fail({ code: 'state', where: 'residual', reason: residual.reason });
+  const held = totalAmount(residual.value);
+  if (held > 0) {
+    const warm = settle(model, vessel, residual.value, fillTemperature);
+    if (warm.ok && warm.value.pressure >= fillPressure) {
+      return fail({ code: 'fill-pressure-too-low', residualPressure: warm.value.pressure });
+    }
+  }
+  const met = meetOrder(job, model, vessel, residual.value);
+  if (met.ok) return ok({ ...met.value, residual: residual.value, total: mole(totalAmount(met.value.finished)) });
+  return fail(met.reason.code === 'missed' ? explainMiss(job, model, vessel, residual.value, met.reason) : met.reason);
+}
+
+/** What the fill comes to where it misses the order, mol. */
+interface Miss {
+  readonly code: 'missed';
+  readonly gases: readonly number[];
+  readonly finished: Float64Array;
+}
+
+/** Solves for the additions, again and again until the amount that fits agrees with the composition that comes out. */
+function meetOrder(
+  job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array,
+): Outcome<Pick<FillAmounts, 'additions' | 'finished'>, Miss | Extract<AmountProblem, { code: 'state' }>> {
+  const { fillPressure, fillTemperature } = job.order;
+  const volume = cylinderVolume(vessel, fillPressure, fillTemperature);
+  let fractions = orderedFractions(job);
+  let previous = 0;
+  for (let round = 0; round < MAXIMUM_ROUNDS; round++) {
+    const density = model.density(fillTemperature, fillPressure, fractions);
+    if (!density.ok) return fail({ code: 'state', where: 'finished gas', reason: density.reason });
+    const total = density.value.density * volume;
+    const additions = balanceEquations(job, residual, total);
+    const finished = finishedAmounts(job, additions, residual);
+    const gases = missedComponents(job, finished);
+    if (gases.length > 0) return fail({ code: 'missed', gases, finished });
+    if (Math.abs(total - previous) <= 1e-14 * total) return ok({ additions, finished });
+    const sum = totalAmount(finished);
+    fractions = finished.map((amount) => amount / sum);
+    previous = total;
+  }
+  return fail({ code: 'state', where: 'finished gas', reason: { code: 'not-converged', iterations: MAXIMUM_ROUNDS, residual: 0 } });
+}
+
+/** Amounts left in the cylinder, from its pressure, temperature and composition. */
+function residualAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<Float64Array, ThermoReason> {
+  const { contents } = job.cylinder;
+  if (!(contents.pressure > 0)) return ok(new Float64Array(job.gases.length));
+  return amountsAt(model, vessel, contents.pressure, contents.temperature, contents.fractions);
+}
+
+function amountsAt(
+  model: ThermoModel, vessel: Vessel, pressure: Pascal, temperature: Kelvin, fractions: Float64Array,
+): Outcome<Float64Array, ThermoReason> {
+  const density = model.density(temperature, pressure, fractions);
+  if (!density.ok) return density;
+  const total = density.value.density * cubicMetre(cylinderVolume(vessel, pressure, temperature));
+  return ok(fractions.map((x) => x * total));
+}
+
+function orderedFractions(job: Job): Float64Array {
+  const fractions = new Float64Array(job.gases.length);
+  for (const component of job.order.components) fractions[component.gas] = component.nominal;
+  return fractions;
+}
+
+/** Adds up what every parent brings on top of the residual, mol per gas. */
+export function finishedAmounts(job: Job, additions: readonly number[], residual: Float64Array): Float64Array {
+  const finished = Float64Array.from(residual);
+  job.parents.forEach((parent, s) => {
+    for (let i = 0; i < finished.length; i++) finished[i]! += additions[s]! * parent.fractions[i]!;
+  });
+  return finished;
+}
+
+/**
+ * One equation a component but the balance, Σₛ (yₛᵢ − xᵢ) nₛ = xᵢ R − rᵢ, divided
+ * by xᵢ so that a trace weighs as much as a major component, and one for the
+ * total, all in units of the total. Where several parents would do, argon in
+ * place of the nitrogen ordered as balance, those that bring the least of gases
+ * not ordered are chosen first; the equations alone then set the amounts.
+ */
+function balanceEquations(job: Job, residual: Float64Array, total: number): number[] {
+  const held = totalAmount(residual) / total;
+  const a: number[][] = [];
+  const b: number[] = [];
+  for (const { gas, nominal, isBalance } of job.order.components) {
+    if (isBalance) continue;
+    a.push(job.parents.map((parent) => parent.fractions[gas]! / nominal - 1));
+    b.push(held - residual[gas]! / total / nominal);
+  }
+  a.push(job.parents.map(() => 1));
+  b.push(1 - held);
+  const unordered = job.parents.map((parent) => PURITY_WEIGHT * unorderedShare(job, parent.fractions));
+  const preferred = nonNegativeLeastSquares([...a, unordered], [...b, 0]);
+  const used = job.parents.map((_, s) => s).filter((s) => preferred[s]! > 0);
+  const shares = nonNegativeLeastSquares(a.map((row) => used.map((s) => row[s]!)), b);
+  const additions = new Array<number>(job.parents.length).fill(0);
+  used.forEach((s, k) => (additions[s] = shares[k]! * total));
+  return additions;
+}
+
+function unorderedShare(job: Job, fractions: Float64Array): number {
+  const ordered = new Set(job.order.components.map(({ gas }) => gas));
+  return fractions.reduce((sum, y, i) => (ordered.has(i) ? sum : sum + y), 0);
+}
+
+/** Ordered gases whose finished fraction is not the nominal one; the balance yields a little to impurities. */
+function missedComponents(job: Job, finished: Float64Array): number[] {
+  const total = totalAmount(finished);
+  return job.order.components
+    .filter(({ gas, nominal, tolerance, isBalance }) => {
+      const allowed = isBalance ? Math.max(tolerance ?? BALANCE_MET, MET) : MET;
+      return !(Math.abs(finished[gas]! / total / nominal - 1) <= allowed);
+    })
+    .map(({ gas }) => gas);
+}
+
+function explainMiss(
+  job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array, { gases, finished }: Miss,
+): AmountProblem {
+  const sum = totalAmount(finished);
+  const nearest = { fractions: finished.map((amount) => amount / sum) };
+  const unsupplied = gases.filter((gas) => job.parents.every((parent) => parent.fractions[gas] === 0) && residual[gas] === 0);
+  if (unsupplied.length > 0) return { code: 'component-without-parent', gases: unsupplied, nearest };
+  const share = largestResidualShare(job, model, vessel, residual);
+  if (share === null) return { code: 'cannot-be-made', gases, nearest };
+  return { code: 'residual-in-the-way', gases, ventTo: ventPressure(job, model, vessel, residual, share), nearest };
+}
+
+/** Largest part of the residual, below the whole, with which the order can be met; null: not even with none. */
+function largestResidualShare(job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array): number | null {
+  const works = (share: number): boolean =>
+    meetOrder(job, model, vessel, residual.map((amount) => amount * share)).ok;
+  if (totalAmount(residual) === 0 || !works(0)) return null;
+  let low = 0;
+  let high = 1;
+  for (let step = 0; step < 40; step++) {
+    const middle = (low + high) / 2;
+    if (works(middle)) low = middle;
+    else high = middle;
+  }
+  return low;
+}
+
+/** Pressure of a part of the residual at its own temperature; null when nothing may stay. */
+function ventPressure(job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array, share: number): Pascal | null {
+  if (share < 1e-6) return null;
+  const vented = settle(model, vessel, residual.map((amount) => amount * share), job.cylinder.contents.temperature);
+  return vented.ok ? pascal(vented.value.pressure) : null;
+}

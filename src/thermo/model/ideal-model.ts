@@ -1,0 +1,92 @@
+/**
+ * The ideal gas as a thermodynamic model: αʳ = 0. It is what bench arithmetic
+ * without a model assumes, and the smallest worked example of the contract.
+ */
+import { fail, molePerCubicMetre, ok, pascal } from '../../units/index.ts';
+import type { Kelvin, MolePerCubicMetre, Outcome, Pascal } from '../../units/index.ts';
+import { GAS_CONSTANT } from '../constants.ts';
+import type { Composition, DensitySolution, RangeVerdict, ThermoModel, ThermoReason, ThermoState } from '../contract.ts';
+import { gasIds } from '../data/gases.ts';
+import type { GasId } from '../data/gases.ts';
+import { idealGasParts } from '../data/kunz-wagner-2012/ideal.ts';
+import { pureEquation } from '../data/kunz-wagner-2012/pure.ts';
+import { assembleState } from '../state/properties.ts';
+import { rangeVerdict } from '../state/range.ts';
+import { idealGasEvaluator } from '../terms/ideal-part.ts';
+import { compositionFault, densityFault, gasListFault, pressureFault, temperatureFault } from './input-checks.ts';
+
+class IdealModel implements ThermoModel {
+  readonly gases: readonly GasId[];
+  readonly gasConstant = GAS_CONSTANT;
+  readonly #idealPart: ReturnType<typeof idealGasEvaluator>;
+  readonly #molarMasses: readonly number[];
+
+  constructor(gases: readonly GasId[]) {
+    this.gases = gases;
+    this.#idealPart = idealGasEvaluator(gases.map((gas) => idealGasParts[gas]), GAS_CONSTANT);
+    this.#molarMasses = gases.map((gas) => pureEquation(gas).molarMass_g_per_mol * 1e-3);
+  }
+
+  pressure(temperature: Kelvin, density: MolePerCubicMetre, x: Composition): Outcome<Pascal, ThermoReason> {
+    const fault = this.#fault(temperature, x) ?? (density === 0 ? undefined : densityFault(density));
+    if (fault) return fail(fault);
+    const value = density * this.gasConstant * temperature;
+    return value < Infinity ? ok(pascal(value)) : fail({ code: 'equation-breaks-down', temperature, density });
+  }
+
+  density(temperature: Kelvin, pressure: Pascal, x: Composition): Outcome<DensitySolution, ThermoReason> {
+    const fault = this.#fault(temperature, x) ?? pressureFault(pressure);
+    if (fault) return fail(fault);
+    const density = pressure / (this.gasConstant * temperature);
+    return density > 0 && density < Infinity
+      ? ok({ density: molePerCubicMetre(density), iterations: 0, residual: 0 })
+      : fail({ code: 'equation-breaks-down', temperature, density: 0 });
+  }
+
+  state(temperature: Kelvin, density: MolePerCubicMetre, x: Composition): Outcome<ThermoState, ThermoReason> {
+    const fault = this.#fault(temperature, x) ?? densityFault(density);
+    if (fault) return fail(fault);
+    return assembleState({
+      temperature, density,
+      gasConstant: this.gasConstant,
+      molarMass: this.#molarMasses.reduce((sum, molarMass, i) => sum + x[i]! * molarMass, 0),
+      ideal: this.#idealPart(temperature, density, x),
+      residual: new Float64Array(6),
+      lnFugacityCoefficients: new Float64Array(this.gases.length),
+    });
+  }
+
+  stateAtPressure(temperature: Kelvin, pressure: Pascal, x: Composition): Outcome<ThermoState, ThermoReason> {
+    const solution = this.density(temperature, pressure, x);
+    return solution.ok ? this.state(temperature, solution.value.density, x) : solution;
+  }
+
+  range(temperature: Kelvin, pressure: Pascal): RangeVerdict {
+    return rangeVerdict(temperature, pressure);
+  }
+
+  secondVirialCoefficient(temperature: Kelvin, x: Composition): Outcome<number, ThermoReason> {
+    const fault = this.#fault(temperature, x);
+    return fault ? fail(fault) : ok(0);
+  }
+
+  /** Nothing is fitted in an ideal gas: every pair present is named. */
+  modelClass(x: Composition): ReturnType<ThermoModel['modelClass']> {
+    const present = this.gases.filter((_, i) => x[i]! > 0);
+    const estimatedPairs = present.flatMap((first, i) => present.slice(i + 1).map((second) => [first, second] as const));
+    return { class: 'estimated', estimatedPairs };
+  }
+
+  #fault(temperature: number, x: Composition): ThermoReason | undefined {
+    return compositionFault(x, this.gases) ?? temperatureFault(temperature);
+  }
+}
+
+/**
+ * The ideal-gas model of a list of gases, heat capacities from GERG-2008. Fails
+ * with `no-gases`, `unknown-gas` or `duplicate-gas`.
+ */
+export function idealModel(gases: readonly GasId[]): Outcome<ThermoModel, ThermoReason> {
+  const fault = gasListFault(gases, (gas) => (gasIds as readonly string[]).includes(gas));
+  return fault ? fail(fault) : ok(new IdealModel([...gases]));
+}
