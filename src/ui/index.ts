@@ -1,0 +1,5 @@
+/** Door of the user interface (level 4): may use `units`, `blending` and `state`. */
+import './styles/index.css';
+
+export { App } from './App.tsx';
+export { WorkspaceProvider } from './bindings/workspace.tsx';

@@ -1,0 +1,41 @@
+import type { CompositionLine } from '../../blending/index.ts';
+import { TextField } from './Field.tsx';
+import { SectionProblem } from './SectionProblem.tsx';
+
+interface CompositionEditorProps {
+  /** Path of the list in the recipe. */
+  readonly path: string;
+  readonly legend: string;
+  readonly lines: readonly CompositionLine[];
+  readonly onChange: (lines: readonly CompositionLine[]) => void;
+}
+
+/** A short table of gas and amount, for residuals and purity tables. */
+export function CompositionEditor({ path, legend, lines, onChange }: CompositionEditorProps) {
+  const edit = (index: number, patch: Partial<CompositionLine>) => {
+    onChange(lines.map((line, place) => (place === index ? { ...line, ...patch } : line)));
+  };
+  return (
+    <fieldset className="composition">
+      <legend>{legend}</legend>
+      {lines.map((line, index) => {
+        const field = `${path}.${String(index)}`;
+        const which = `line ${String(index + 1)} of ${legend}`;
+        return (
+          <div className="composition-line" key={index}>
+            <TextField bare field={`${field}.gas`} label={`gas, ${which}`} value={line.gas} list="gases" placeholder="gas" onChange={(gas) => { edit(index, { gas }); }} />
+            <TextField bare field={`${field}.amount`} label={`amount, ${which}`} value={line.amount} placeholder="amount" onChange={(amount) => { edit(index, { amount }); }} />
+            <button type="button" className="plain remove" aria-label={`Remove ${which}`} onClick={() => { onChange(lines.filter((_, place) => place !== index)); }}>×</button>
+          </div>
+        );
+      })}
+      <SectionProblem field={path} />
+      <button
+        type="button" className="plain"
+        onClick={() => { onChange([...lines, { gas: '', amount: lines.length === 0 ? 'balance' : '' }]); }}
+      >
+        Add a line
+      </button>
+    </fieldset>
+  );
+}

@@ -1,0 +1,40 @@
+import { addGauge, editConditions, editGauge, removeGauge } from '../../../state/index.ts';
+import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
+import { ChoiceField, PressureField, TextField } from '../../parts/Field.tsx';
+
+/** Gauges, balance and the conditions of the day: entered once, seldom changed. */
+export function InstrumentsSection() {
+  const gauges = useWorkspaceState((state) => state.recipe.gauges);
+  const conditions = useWorkspaceState((state) => state.recipe.conditions);
+  const actions = useActions();
+  const edit = (patch: Parameters<typeof editConditions>[0]) => { actions.run(editConditions(patch)); };
+  return (
+    <section aria-labelledby="instruments-title">
+      <h2 id="instruments-title">Instruments and room</h2>
+      {gauges.map((gauge) => (
+        <details key={gauge.key}>
+          <summary>{gauge.name === '' ? 'Gauge' : `Gauge ${gauge.name}`}: to {gauge.fullScale} {gauge.reference}, {gauge.accuracy} of span</summary>
+          <TextField field={`gauges.${gauge.key}.name`} label="name" value={gauge.name} onChange={(name) => { actions.run(editGauge(gauge.key, { name })); }} />
+          <TextField field={`gauges.${gauge.key}.unit`} label="unit on its face" value={gauge.unit} onChange={(unit) => { actions.run(editGauge(gauge.key, { unit })); }} />
+          <ChoiceField field={`gauges.${gauge.key}.reference`} label="reads" value={gauge.reference} choices={['gauge', 'absolute']} onChange={(reference) => { actions.run(editGauge(gauge.key, { reference })); }} />
+          <TextField field={`gauges.${gauge.key}.fullScale`} label="full scale" value={gauge.fullScale} onChange={(fullScale) => { actions.run(editGauge(gauge.key, { fullScale })); }} />
+          <TextField field={`gauges.${gauge.key}.accuracy`} label="accuracy, of span" value={gauge.accuracy} onChange={(accuracy) => { actions.run(editGauge(gauge.key, { accuracy })); }} />
+          <TextField field={`gauges.${gauge.key}.resolution`} label="smallest step" value={gauge.resolution} onChange={(resolution) => { actions.run(editGauge(gauge.key, { resolution })); }} />
+          <button type="button" className="plain remove-long" onClick={() => { actions.run(removeGauge(gauge.key)); }}>Remove this gauge</button>
+        </details>
+      ))}
+      <button
+        type="button" className="plain"
+        onClick={() => { actions.run(addGauge({ name: `G${String(gauges.length + 1)}`, unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.25 %', resolution: '0.1 bar' })); }}
+      >
+        Add a gauge
+      </button>
+      <TextField field="conditions.balanceResolution" label="balance step" value={conditions.balanceResolution} onChange={(balanceResolution) => { edit({ balanceResolution }); }} />
+      <TextField field="conditions.roomTemperature" label="room temperature" value={conditions.roomTemperature} onChange={(roomTemperature) => { edit({ roomTemperature }); }} />
+      <TextField field="conditions.relativeHumidity" label="relative humidity" value={conditions.relativeHumidity} onChange={(relativeHumidity) => { edit({ relativeHumidity }); }} />
+      <TextField field="conditions.roomVolume" label="room volume" value={conditions.roomVolume} placeholder="not stated" onChange={(roomVolume) => { edit({ roomVolume }); }} />
+      <TextField field="conditions.concentrationTemperature" label="mg/m³ stated at" value={conditions.concentrationTemperature} onChange={(concentrationTemperature) => { edit({ concentrationTemperature }); }} />
+      <PressureField field="conditions.concentrationPressure" label="and pressure" value={conditions.concentrationPressure} onChange={(concentrationPressure) => { edit({ concentrationPressure }); }} />
+    </section>
+  );
+}
