@@ -13,7 +13,7 @@ import type { DensityResult } from './density-result.ts';
 import { NearCriticalSearch } from './near-critical.ts';
 
 /**
- * Below this τ no isotherm of the model turns over: each pure equation rises
+ * From τ = 0.15 to here no isotherm of the model turns over: each pure equation rises
  * steadily above its own critical temperature, and the departure functions are
  * small beside them (checked by a scan of random mixtures in the tests).
  */

@@ -1,0 +1,128 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { FunctionValues } from '../../../src/thermo/terms/function-values.ts';
+import { ALPHA, DELTA, DELTA2, DELTA_TAU, MergedTerms, TAU, TAU2 } from '../../../src/thermo/terms/merged-terms.ts';
+import { buildTermTable } from '../../../src/thermo/terms/term-table.ts';
+import type { Term } from '../../../src/thermo/terms/term-table.ts';
+
+/** Two functions that share slots, with every kind of damping. */
+const functions: readonly (readonly Term[])[] = [
+  [
+    { n: 0.6, d: 1, t: 0.125, damping: { kind: 'none' } },
+    { n: -1.7, d: 2, t: 1.125, damping: { kind: 'none' } },
+    { n: 0.4, d: 1, t: 2.5, damping: { kind: 'power', c: 1 } },
+    { n: -0.2, d: 3, t: 4, damping: { kind: 'power', c: 2 } },
+    { n: 0.03, d: 6, t: 28, damping: { kind: 'power', c: 6 } },
+  ],
+  [
+    { n: 0.9, d: 2, t: 1.125, damping: { kind: 'none' } },
+    { n: 0.3, d: 1, t: 2.5, damping: { kind: 'power', c: 1 } },
+    { n: -0.5, d: 1, t: -1, damping: { kind: 'exponential', eta: 1, epsilon: 0.5, beta: 1, gamma: 0.5 } },
+    { n: 0.25, d: 2, t: 7.85, damping: { kind: 'exponential', eta: 0, epsilon: 0.5, beta: 3, gamma: 0.5 } },
+  ],
+];
+const table = buildTermTable(functions);
+
+/** The definition, term by term. */
+function value(terms: readonly Term[], delta: number, tau: number): number {
+  return terms.reduce((sum, { n, d, t, damping }) => {
+    const h = damping.kind === 'none' ? 0
+      : damping.kind === 'power' ? -(delta ** damping.c)
+        : -damping.eta * (delta - damping.epsilon) ** 2 - damping.beta * (delta - damping.gamma);
+    return sum + n * delta ** d * tau ** t * Math.exp(h);
+  }, 0);
+}
+
+const weights = Float64Array.of(0.7, 0.21);
+function sum(delta: number, tau: number): number {
+  return functions.reduce((total, terms, k) => total + weights[k]! * value(terms, delta, tau), 0);
+}
+
+function derivatives(delta: number, tau: number): Float64Array {
+  const merged = new MergedTerms(table);
+  const out = new Float64Array(6);
+  merged.setWeights(weights);
+  merged.setTauWithDerivatives(tau);
+  merged.evaluateAll(delta, out);
+  return out;
+}
+
+/** About the largest term, which sets the rounding. */
+function scaleAt(tau: number): number {
+  return 10 * (1 + tau ** 28 + 1 / tau);
+}
+
+fc.configureGlobal({ seed: 2008 });
+
+const states = { delta: fc.double({ min: 0.05, max: 2.5, noNaN: true }), tau: fc.double({ min: 0.2, max: 1.6, noNaN: true }) };
+
+describe('term table', () => {
+  it('keeps shared slots once', () => {
+    expect(table.slotKernel).toHaveLength(7);
+    expect(table.temperatureExponents).toHaveLength(7);
+    expect(table.families).toHaveLength(6);
+  });
+});
+
+describe('merged terms', () => {
+  it('equal the sum of the terms', () => {
+    fc.assert(fc.property(states.delta, states.tau, (delta, tau) => {
+      expect(Math.abs(derivatives(delta, tau)[ALPHA]! - sum(delta, tau))).toBeLessThan(1e-13 * scaleAt(tau));
+    }));
+  });
+
+  it('have the derivatives of that sum', () => {
+    fc.assert(fc.property(states.delta, states.tau, (delta, tau) => {
+      const found = derivatives(delta, tau);
+      const h = 1e-4;
+      const at = (i: number, j: number) => sum(delta * (1 + i * h), tau * (1 + j * h));
+      const close = (position: number, expected: number) => {
+        expect(Math.abs(found[position]! - expected)).toBeLessThan(2e-4 * scaleAt(tau));
+      };
+      close(DELTA, (at(1, 0) - at(-1, 0)) / (2 * h));
+      close(DELTA2, (at(1, 0) - 2 * at(0, 0) + at(-1, 0)) / h ** 2);
+      close(TAU, (at(0, 1) - at(0, -1)) / (2 * h));
+      close(TAU2, (at(0, 1) - 2 * at(0, 0) + at(0, -1)) / h ** 2);
+      close(DELTA_TAU, (at(1, 1) - at(1, -1) - at(-1, 1) + at(-1, -1)) / (4 * h ** 2));
+    }));
+  });
+
+  it('give the same pressure derivatives on the short way', () => {
+    fc.assert(fc.property(states.delta, states.tau, (delta, tau) => {
+      const merged = new MergedTerms(table);
+      merged.setWeights(weights);
+      merged.setTau(tau);
+      merged.evaluate(delta);
+      const all = derivatives(delta, tau);
+      expect(Math.abs(merged.delta1 - all[DELTA]!)).toBeLessThan(1e-13 * scaleAt(tau));
+      expect(Math.abs(merged.delta2 - all[DELTA2]!)).toBeLessThan(1e-12 * scaleAt(tau));
+    }));
+  });
+
+  it('start as the virial series', () => {
+    const merged = new MergedTerms(table);
+    merged.setWeights(weights);
+    merged.setTau(0.8);
+    merged.expandAtZero();
+    const { virial1, virial2 } = merged;
+    merged.evaluate(1e-4);
+    expect((merged.delta1 / 1e-4 - virial1) / 1e-4 / virial2).toBeCloseTo(1, 3);
+  });
+
+  it('forget the functions of an earlier weighting', () => {
+    const merged = new MergedTerms(table);
+    merged.setWeights(weights);
+    merged.setWeights(Float64Array.of(0, 1));
+    const out = new Float64Array(6);
+    merged.setTauWithDerivatives(0.9);
+    merged.evaluateAll(0.7, out);
+    expect(out[ALPHA]).toBeCloseTo(value(functions[1]!, 0.7, 0.9), 12);
+  });
+});
+
+describe('function values', () => {
+  it('are the functions one by one', () => {
+    const values = new FunctionValues(table).evaluate(0.7, 0.9);
+    for (const [k, terms] of functions.entries()) expect(values[k]).toBeCloseTo(value(terms, 0.7, 0.9), 12);
+  });
+});
