@@ -31,6 +31,8 @@ export function recipeSentence(problem: RecipeProblem): string {
       return 'A “<” limit belongs in a purity table; state the amount that is there or wanted.';
     case 'not-positive':
       return 'The value must be above zero.';
+    case 'barometer-unlikely':
+      return `The air pressure must lie between ${hectopascal(problem.lowest)} and ${hectopascal(problem.highest)} absolute: look at its number and its unit.`;
     case 'no-parents':
       return 'Enter the parent gases to fill from.';
     case 'key-repeated':
@@ -103,6 +105,10 @@ function absolute(pressure: Pascal, barometer: Pascal): string {
 
 function bar(pressure: Pascal, barometer: Pascal): string {
   return formatPressureInFull(pressure, { unit: 'bar', reference: 'gauge', barometer, resolution: 1e3 });
+}
+
+function hectopascal(pressure: Pascal): string {
+  return `${String(Math.round(pressure / 100))} hPa`;
 }
 
 function amount(x: number): string {

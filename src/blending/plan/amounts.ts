@@ -4,7 +4,7 @@ import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { Job } from '../recipe/job.ts';
 import { cylinderVolume, settle, totalAmount } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
-import { nonNegativeLeastSquares } from './least-squares.ts';
+import { leastSquares, nonNegativeLeastSquares } from './least-squares.ts';
 
 /** What goes in from each parent, and what was there before. */
 export interface FillAmounts {
@@ -77,12 +77,15 @@ function meetOrder(
   const { fillPressure, fillTemperature } = job.order;
   const volume = cylinderVolume(vessel, fillPressure, fillTemperature);
   let fractions = orderedFractions(job);
+  let used: readonly number[] | null = null;
   let previous = 0;
   for (let round = 0; round < MAXIMUM_ROUNDS; round++) {
     const density = model.density(fillTemperature, fillPressure, fractions);
     if (!density.ok) return fail({ code: 'state', where: 'finished gas', reason: density.reason });
     const total = density.value.density * volume;
-    const additions = balanceEquations(job, residual, total);
+    const equations = balanceEquations(job, residual, total);
+    used ??= chooseParents(job, equations);
+    const additions = solveBalance(job, equations, used, total);
     const finished = finishedAmounts(job, additions, residual);
     const gases = missedComponents(job, finished);
     if (gases.length > 0) return fail({ code: 'missed', gases, finished });
@@ -125,14 +128,17 @@ export function finishedAmounts(job: Job, additions: readonly number[], residual
   return finished;
 }
 
+interface Balance {
+  readonly a: readonly (readonly number[])[];
+  readonly b: readonly number[];
+}
+
 /**
  * One equation a component but the balance, Σₛ (yₛᵢ − xᵢ) nₛ = xᵢ R − rᵢ, divided
  * by xᵢ so that a trace weighs as much as a major component, and one for the
- * total, all in units of the total. Where several parents would do, argon in
- * place of the nitrogen ordered as balance, those that bring the least of gases
- * not ordered are chosen first; the equations alone then set the amounts.
+ * total, all in units of the total.
  */
-function balanceEquations(job: Job, residual: Float64Array, total: number): number[] {
+function balanceEquations(job: Job, residual: Float64Array, total: number): Balance {
   const held = totalAmount(residual) / total;
   const a: number[][] = [];
   const b: number[] = [];
@@ -143,10 +149,25 @@ function balanceEquations(job: Job, residual: Float64Array, total: number): numb
   }
   a.push(job.parents.map(() => 1));
   b.push(1 - held);
+  return { a, b };
+}
+
+/**
+ * Which parents to use. Where several would do, argon in place of the nitrogen
+ * ordered as balance, those that bring the least of gases not ordered.
+ */
+function chooseParents(job: Job, { a, b }: Balance): number[] {
   const unordered = job.parents.map((parent) => PURITY_WEIGHT * unorderedShare(job, parent.fractions));
   const preferred = nonNegativeLeastSquares([...a, unordered], [...b, 0]);
-  const used = job.parents.map((_, s) => s).filter((s) => preferred[s]! > 0);
-  const shares = nonNegativeLeastSquares(a.map((row) => used.map((s) => row[s]!)), b);
+  return job.parents.map((_, s) => s).filter((s) => preferred[s]! > 0);
+}
+
+/** mol from each parent; only those in `used` are drawn from. */
+function solveBalance(job: Job, { a, b }: Balance, used: readonly number[], total: number): number[] {
+  const plain = leastSquares(a, b, used);
+  const shares = plain !== null && plain.every((share) => share >= 0)
+    ? plain
+    : nonNegativeLeastSquares(a.map((row) => used.map((s) => row[s]!)), b);
   const additions = new Array<number>(job.parents.length).fill(0);
   used.forEach((s, k) => (additions[s] = shares[k]! * total));
   return additions;

@@ -23,9 +23,11 @@ export function leastSquares(a: Matrix, b: readonly number[], columns: readonly 
   const right = [...b];
   for (let k = 0; k < count; k++) {
     let norm = 0;
-    for (let i = k; i < rows; i++) norm = Math.hypot(norm, work[i]![k]!);
+    for (let i = k; i < rows; i++) norm += work[i]![k]! ** 2;
+    norm = Math.sqrt(norm);
     let whole = 0;
-    for (let i = 0; i < rows; i++) whole = Math.hypot(whole, a[i]![columns[k]!]!);
+    for (let i = 0; i < rows; i++) whole += a[i]![columns[k]!]! ** 2;
+    whole = Math.sqrt(whole);
     if (!(norm > DEPENDENT * whole)) return null;
     const pivot = work[k]![k]!;
     const head = pivot > 0 ? -norm : norm;
@@ -111,8 +113,9 @@ function steepest(
     let length = 0;
     for (let i = 0; i < b.length; i++) {
       gradient += a[i]![j]! * residual[i]!;
-      length = Math.hypot(length, a[i]![j]!);
+      length += a[i]![j]! ** 2;
     }
+    length = Math.sqrt(length);
     // Compared per unit of column length, or a trace component's long column would always win.
     const slope = length > 0 ? gradient / length : 0;
     if (slope > 1e-14 * scale && slope > bestGradient) {

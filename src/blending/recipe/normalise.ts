@@ -16,6 +16,10 @@ import { FieldReader } from './reader.ts';
 /** One atmosphere, used only while the barometer's own text cannot be read. */
 const STANDARD_ATMOSPHERE = pascal(101_325);
 
+/** Air pressures taken as possible, absolute: above any inhabited height, and above any record at sea level. */
+const LOWEST_BAROMETER = pascal(50_000);
+const HIGHEST_BAROMETER = pascal(110_000);
+
 /** All problems of a recipe together. */
 export interface RecipeProblems {
   readonly code: 'recipe-problems';
@@ -31,6 +35,9 @@ export function normaliseRecipe(recipe: Recipe): Outcome<Job, RecipeProblems> {
   const barometer = parsePressure(barometerText, { unit: 'hPa', reference: 'absolute' });
   const reader = new FieldReader(barometer.ok ? barometer.value.absolute : STANDARD_ATMOSPHERE);
   if (!barometer.ok) reader.problems.push({ code: 'entry', field: 'conditions.barometer', problem: barometer.reason });
+  else if (!(reader.barometer >= LOWEST_BAROMETER && reader.barometer <= HIGHEST_BAROMETER)) {
+    reader.problems.push({ code: 'barometer-unlikely', field: 'conditions.barometer', lowest: LOWEST_BAROMETER, highest: HIGHEST_BAROMETER });
+  }
 
   const ordered = readComposition(reader, 'order.components', recipe.order.components, false);
   if (recipe.order.components.length === 0) reader.problems.push({ code: 'no-components', field: 'order.components' });

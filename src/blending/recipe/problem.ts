@@ -25,6 +25,8 @@ export type RecipeProblem =
   | { readonly code: 'fraction-zero'; readonly field: FieldPath }
   | { readonly code: 'limit-in-order'; readonly field: FieldPath }
   | { readonly code: 'not-positive'; readonly field: FieldPath }
+  /** No weather and no laboratory has such an air pressure; a slip of the unit does. Bounds absolute. */
+  | { readonly code: 'barometer-unlikely'; readonly field: FieldPath; readonly lowest: Pascal; readonly highest: Pascal }
   | { readonly code: 'no-parents'; readonly field: FieldPath }
   | { readonly code: 'key-repeated'; readonly field: FieldPath; readonly key: string }
   | { readonly code: 'component-without-parent'; readonly field: FieldPath; readonly gases: readonly GasId[]; readonly nearest: NearestComposition }

@@ -10,7 +10,7 @@ const card: RuleCard = {
   id: 'carbon-monoxide-pressure',
   title: 'Pressure cap of carbon monoxide at 21.1 °C',
   source: '49 CFR 173.302a',
-  edition: 'as publicly transcribed',
+  edition: 'as read in a public copy',
   trust: 'seen',
 };
 
@@ -32,8 +32,8 @@ function judge(context: HazardContext): readonly Finding[] {
   const gauge = gaugeOfFinish(plan);
   const cap = pascal(toPascal(1000, 'psi') + barometer);
   const partial = content < mainComponent;
-  const reference = partial ? 'absolute' : undefined;
-  const limit = showPressure(plan, cap, gauge, reference);
+  const display = partial ? { reference: 'absolute' } as const : {};
+  const limit = showPressure(plan, cap, gauge, display);
   const pressure = developedPressure(context, celsiusToKelvin(21.1));
   if (!pressure.ok) {
     // A trace of carbon monoxide cannot reach the cap in any cylinder.
@@ -46,7 +46,7 @@ function judge(context: HazardContext): readonly Finding[] {
   const { workingPressure } = plan.job.cylinder;
   const most = toPascal(2000, 'psi') + barometer;
   const dry = workingPressure === null ? most : Math.min(most, gaugeShare(workingPressure, 5 / 6, barometer));
-  const figure = showPressure(plan, judged, gauge, reference);
-  const text = words.carbonMonoxideCap(figure, limit, showPressure(plan, pascal(dry), gauge, reference), partial);
+  const figure = showPressure(plan, judged, gauge, display);
+  const text = words.carbonMonoxideCap(figure, limit, showPressure(plan, pascal(dry), gauge, display), partial);
   return [finding(card, { verdict: 'caution', place, words: text, figure, limit })];
 }

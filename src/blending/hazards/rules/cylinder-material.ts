@@ -40,14 +40,14 @@ function judge({ plan }: HazardContext): readonly Finding[] {
     const partial = pascal(content('hydrogen') * plan.finished.pressure);
     const much = partial > hydrogenPartial;
     const gauge = gaugeOfFinish(plan);
-    const figure = showPressure(plan, partial, gauge, 'absolute');
+    const figure = showPressure(plan, partial, gauge, { reference: 'absolute' });
     findings.push(finding(card, {
       verdict: much ? 'caution' : 'note',
       place,
       about: 'hydrogen',
       words: (much ? words.hydrogenInSteel : words.littleHydrogenInSteel)(figure, stated),
       figure,
-      limit: showPressure(plan, pascal(hydrogenPartial), gauge, 'absolute'),
+      limit: showPressure(plan, pascal(hydrogenPartial), gauge, { reference: 'absolute' }),
     }));
   }
   return findings;

@@ -15,7 +15,7 @@ const card: RuleCard = {
   id: 'oxygen-compression-heat',
   title: 'Heat of compression when an oxygen parent is opened',
   source: '46 CFR 197.326 (slow opening above 125 psi gauge); adiabatic compression of ideal oxygen',
-  edition: 'CFR as publicly transcribed; temperature computed with γ = 1.4',
+  edition: 'CFR as read in a public copy; temperature computed with γ = 1.4',
   trust: 'seen',
 };
 

@@ -17,7 +17,7 @@ const card: RuleCard = {
   id: 'oxygen-enriched',
   title: 'Oxygen-enriched gas: finished gas, each state, each parent',
   source: '29 CFR 1910.146; ISO 10156 clause 5.3',
-  edition: 'CFR as publicly transcribed; ISO 10156:2017',
+  edition: 'CFR as read in a public copy; ISO 10156:2017',
   trust: 'seen',
 };
 

@@ -4,14 +4,14 @@ import type { Finding } from '../finding.ts';
 import { celsiusToKelvin, developedPressure, exceeds, gaugeShare } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showPressure } from '../show.ts';
+import { gaugeOfFinish, showAgainst, showPressure } from '../show.ts';
 import { mixtureLc50 } from '../toxicity.ts';
 
 const transportCard: RuleCard = {
   id: 'pressure-at-55',
   title: 'Pressure at 55 °C against 5/4 of the service pressure',
   source: '49 CFR 173.301a(d)',
-  edition: 'as publicly transcribed',
+  edition: 'as read in a public copy',
   trust: 'seen',
 };
 
@@ -49,13 +49,12 @@ function judgeTransport(context: HazardContext): readonly Finding[] {
     return [finding(transportCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
   if (!exceeds(pressure.value, limit)) return [];
-  const figure = showPressure(plan, pressure.value, gauge);
+  const shown = showAgainst(plan, pressure.value, limit, gauge);
   return [finding(transportCard, {
     verdict: 'caution',
     place,
-    words: toxic ? words.aboveServicePressureToxic(figure, shownLimit) : words.aboveFiveQuarters(figure, shownLimit),
-    figure,
-    limit: shownLimit,
+    words: (toxic ? words.aboveServicePressureToxic : words.aboveFiveQuarters)(shown.figure, shown.limit),
+    ...shown,
     trust: toxic ? 'from memory' : 'seen',
   })];
 }

@@ -11,7 +11,7 @@ const oxygenCard: RuleCard = {
   id: 'room-oxygen',
   title: 'Oxygen in the room if the cylinder empties into it',
   source: '29 CFR 1910.146 (below 19.5 %, above 23.5 %); EIGA 44; 18 % is used in some countries',
-  edition: 'CFR as publicly transcribed; EIGA 44/18; 18 % and the full-mixing estimate from memory',
+  edition: 'CFR as read in a public copy; EIGA 44/18; 18 % and the full-mixing estimate from memory',
   trust: 'seen',
 };
 
@@ -19,7 +19,7 @@ const flammableCard: RuleCard = {
   id: 'room-flammable',
   title: 'Flammable gas in the room if the cylinder empties into it',
   source: '29 CFR 1910.146 (10 % of the lower flammable limit)',
-  edition: 'as publicly transcribed',
+  edition: 'as read in a public copy',
   trust: 'seen',
 };
 

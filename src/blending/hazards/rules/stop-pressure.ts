@@ -6,13 +6,13 @@ import type { Finding } from '../finding.ts';
 import { exceeds } from '../pressure-limits.ts';
 import { finding } from '../rule.ts';
 import type { FindingWords, HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { showPressure } from '../show.ts';
+import { showAgainst } from '../show.ts';
 
 const card: RuleCard = {
   id: 'stop-above-working-pressure',
   title: 'Every stop against the working pressure',
   source: '49 CFR 173.301a(c), applied to each stop',
-  edition: 'as publicly transcribed',
+  edition: 'as read in a public copy',
   trust: 'seen',
 };
 
@@ -33,8 +33,7 @@ function judge(context: HazardContext): readonly Finding[] {
 
 function judgeStop({ plan, tools }: HazardContext, step: PlanStep, limit: Pascal, marked: Kelvin): Finding {
   const at = formatTemperature(marked);
-  const figure = showPressure(plan, step.state.pressure, step.gauge);
-  const shownLimit = showPressure(plan, limit, step.gauge);
+  const { figure, limit: shownLimit } = showAgainst(plan, step.state.pressure, limit, step.gauge);
   const answer = (verdict: Finding['verdict'], text: FindingWords): Finding =>
     finding(card, { verdict, place: { kind: 'step', step: step.number }, words: text, figure, limit: shownLimit });
   const overfilled = words.stopAboveWorkingPressure(step.number, figure, shownLimit, at);

@@ -3,7 +3,7 @@ import type { Finding } from '../finding.ts';
 import { celsiusToKelvin, developedPressure, exceeds, gaugeShare } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showPressure } from '../show.ts';
+import { gaugeOfFinish, showAgainst, showPressure } from '../show.ts';
 
 const developedCard: RuleCard = {
   id: 'test-pressure',
@@ -42,14 +42,13 @@ function judgeDeveloped(context: HazardContext): readonly Finding[] {
     const text = words.pressureNotComputed('Pressure', '65 °C', pressure.reason.code);
     return [finding(developedCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
-  const figure = showPressure(plan, pressure.value, gauge);
+  const shown = showAgainst(plan, pressure.value, limit, gauge);
   const above = exceeds(pressure.value, limit);
   return [finding(developedCard, {
     verdict: above ? 'hold' : 'note',
     place,
-    words: above ? words.aboveTestPressure(figure, shownLimit) : words.withinTestPressure(figure, shownLimit),
-    figure,
-    limit: shownLimit,
+    words: (above ? words.aboveTestPressure : words.withinTestPressure)(shown.figure, shown.limit),
+    ...shown,
   })];
 }
 
@@ -66,6 +65,6 @@ function judgeSettled(context: HazardContext): readonly Finding[] {
     return [finding(settledCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
   if (!exceeds(pressure.value, limit)) return [];
-  const figure = showPressure(plan, pressure.value, gauge);
-  return [finding(settledCard, { verdict: 'caution', place, words: words.aboveTwoThirds(figure, shownLimit), figure, limit: shownLimit })];
+  const shown = showAgainst(plan, pressure.value, limit, gauge);
+  return [finding(settledCard, { verdict: 'caution', place, words: words.aboveTwoThirds(shown.figure, shown.limit), ...shown })];
 }

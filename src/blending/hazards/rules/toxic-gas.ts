@@ -36,6 +36,7 @@ function judge({ plan }: HazardContext): readonly Finding[] {
   });
   const list = present.map((each) => `${each.gas} ${showFraction(each.content)} (LC50 ${each.lc50} µmol/mol)`).join('; ');
   if (present.length === 0) return [];
+  const names = present.map((each) => `${each.gas} ${showFraction(each.content)}`).join(', ');
   // An LC50 above 1 mol/mol means that no exposure to the mixture reaches it in an hour.
   const figure = mixture > 1e6 ? 'LC50 above 1 000 000 µmol/mol' : `LC50 ${formatNumber(mixture, 0)} µmol/mol`;
   const place = { kind: 'finished gas' } as const;
@@ -48,5 +49,5 @@ function judge({ plan }: HazardContext): readonly Finding[] {
     : mixture <= toxicUpTo
       ? 'Toxic by transport rules.'
       : 'Not classed as toxic for transport, but dangerous to breathe.';
-  return [finding(card, { verdict: 'caution', place, words: words.toxicMixture(figure, list, meaning), figure, limit })];
+  return [finding(card, { verdict: 'caution', place, words: words.toxicMixture(names, figure, list, meaning), figure, limit })];
 }

@@ -4,13 +4,13 @@ import type { Finding } from '../finding.ts';
 import { developedPressure, exceeds } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showPressure } from '../show.ts';
+import { gaugeOfFinish, showAgainst, showPressure } from '../show.ts';
 
 const card: RuleCard = {
   id: 'working-pressure',
   title: 'Working pressure at its marked temperature',
   source: '49 CFR 173.301a(c); UN Model Regulations 1.2.1 and P200',
-  edition: 'CFR as publicly transcribed; UN text from memory',
+  edition: 'CFR as read in a public copy; UN text from memory',
   trust: 'seen',
 };
 
@@ -32,13 +32,12 @@ function judge(context: HazardContext): readonly Finding[] {
     const text = words.pressureNotComputed('Pressure', at, pressure.reason.code);
     return [finding(card, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
-  const figure = showPressure(plan, pressure.value, gauge);
+  const shown = showAgainst(plan, pressure.value, limit, gauge);
   const above = exceeds(pressure.value, limit);
   return [finding(card, {
     verdict: above ? 'hold' : 'note',
     place,
-    words: above ? words.aboveWorkingPressure(figure, shownLimit, at) : words.withinWorkingPressure(figure, shownLimit, at),
-    figure,
-    limit: shownLimit,
+    words: (above ? words.aboveWorkingPressure : words.withinWorkingPressure)(shown.figure, shown.limit, at),
+    ...shown,
   })];
 }

@@ -67,9 +67,9 @@ export const outsideOxidisingTest = (figure: string): Words => ({
   remedy: 'See the check on fuel with oxidiser; a test decides the class.',
 });
 
-export const toxicMixture = (mixture: string, gases: string, words: string): Words => ({
-  title: `Toxic component, finished gas: ${mixture}`,
-  detail: `${words} ${gases}. LC50 (rat, 1 h) from memory; verify before classing. Exposure limits at work are far lower than these figures.`,
+export const toxicMixture = (names: string, mixture: string, gases: string, words: string): Words => ({
+  title: `Toxic component: ${names}`,
+  detail: `${words} Finished gas: ${mixture}; ${gases}. LC50 (rat, 1 h) from memory; verify before classing. Exposure limits at work are far lower than these figures.`,
   remedy: 'Fill under extraction with a gas detector for each component; class, valve and packaging follow the mixture LC50.',
 });
 
