@@ -55,6 +55,8 @@ export function thermoSentence(reason: ThermoReason): string {
   switch (reason.code) {
     case 'no-gas-root':
       return `at ${formatTemperature(kelvin(reason.temperature))} it condenses before it reaches that pressure.`;
+    case 'no-liquid-root':
+      return 'it has no liquid state there.';
     case 'not-converged':
       return `the calculation did not settle after ${String(reason.iterations)} steps.`;
     case 'equation-breaks-down':

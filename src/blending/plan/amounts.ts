@@ -165,7 +165,7 @@ function chooseParents(job: Job, { a, b }: Balance): number[] {
 /** mol from each parent; only those in `used` are drawn from. */
 function solveBalance(job: Job, { a, b }: Balance, used: readonly number[], total: number): number[] {
   const plain = leastSquares(a, b, used);
-  const shares = plain !== null && plain.every((share) => share >= 0)
+  const shares = plain?.every((share) => share >= 0) === true
     ? plain
     : nonNegativeLeastSquares(a.map((row) => used.map((s) => row[s]!)), b);
   const additions = new Array<number>(job.parents.length).fill(0);

@@ -1,0 +1,42 @@
+import { describe, expect, it } from 'vitest';
+import { sequenceOfAdditions } from '../../../src/blending/plan/sequence.ts';
+import { jobOf, planned, pure } from '../lab.ts';
+
+const job = jobOf({
+  order: [['CO', '50 µmol/mol'], ['CO2', '5 %'], ['O2', '10 %'], ['N2', 'balance']], to: '150 bar',
+  parents: [pure('O2'), { key: 'premix', lines: [['CO', '1 %'], ['N2', 'balance']] }, pure('N2'), pure('CO2')],
+});
+
+describe('sequenceOfAdditions', () => {
+  it('smallest amount first, the parent richest in the balance gas last (common practice, no source)', () => {
+    expect(sequenceOfAdditions(job, [6, 0.3, 52, 3], 'smallest first')).toEqual([1, 3, 0, 2]);
+  });
+
+  it('the balance comes last even where it is the smaller amount', () => {
+    expect(sequenceOfAdditions(job, [60, 0.3, 2, 3], 'smallest first')).toEqual([1, 3, 0, 2]);
+  });
+
+  it('as listed', () => {
+    expect(sequenceOfAdditions(job, [6, 0.3, 52, 3], 'as listed')).toEqual([0, 1, 2, 3]);
+  });
+
+  it('leaves out what is not needed', () => {
+    expect(sequenceOfAdditions(job, [6, 0, 52, 0], 'as listed')).toEqual([0, 2]);
+    expect(sequenceOfAdditions(job, [6, 0, 52, 0], 'smallest first')).toEqual([0, 2]);
+    expect(sequenceOfAdditions(job, [0, 0, 0, 0], 'smallest first')).toEqual([]);
+  });
+
+  it('of two parents equally rich in the balance, the larger amount comes last', () => {
+    const twoNitrogens = jobOf({
+      order: [['CO2', '5 %'], ['N2', 'balance']], to: '150 bar',
+      parents: [{ key: 'a', lines: [['N2', '100 %']] }, pure('CO2'), { key: 'b', lines: [['N2', '100 %']] }],
+    });
+    expect(sequenceOfAdditions(twoNitrogens, [40, 3, 10], 'smallest first')).toEqual([1, 2, 0]);
+  });
+
+  it('orders the steps of a plan', () => {
+    const plan = planned({ order: [['N2', 'balance'], ['O2', '10 %'], ['CO2', '5 %']], to: '150 bar', sequence: 'smallest first' });
+    expect(plan.steps.map(({ parent }) => parent)).toEqual(['CO2', 'O2', 'N2']);
+    expect(plan.steps.map(({ number }) => number)).toEqual([1, 2, 3]);
+  });
+});
