@@ -17,7 +17,7 @@ export function Header({ view, onView }: { readonly view: View; readonly onView:
   const actions = useActions();
   return (
     <header className="bar">
-      <span className="brand">Fillwright</span>
+      <h1 className="brand">Fillwright</h1>
       <input className="input recipe-name" type="text" aria-label="Name of the recipe" value={recipe.name} spellCheck={false} onChange={(event) => { actions.run(renameRecipe(event.currentTarget.value)); }} />
       <input className="input recipe-note" type="text" aria-label="Note" placeholder="note" value={recipe.note} spellCheck={false} onChange={(event) => { actions.run(editNote(event.currentTarget.value)); }} />
       <nav aria-label="Views">

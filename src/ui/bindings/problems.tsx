@@ -17,10 +17,19 @@ export function ProblemsProvider({ answer, children }: { readonly answer: PlanAn
   return <ProblemsContext value={problemsOf(answer)}>{children}</ProblemsContext>;
 }
 
-/** The sentence for one field, or null. */
-export function useFieldProblem(field: string): string | null {
+/** What is wrong with one field. `waiting`: it is merely empty so far, which is no mistake of anybody's. */
+export interface FieldProblem {
+  readonly sentence: string;
+  readonly waiting: boolean;
+}
+
+/** The problem of one field, or null. */
+export function useFieldProblem(field: string): FieldProblem | null {
   const problem = useContext(ProblemsContext).find((candidate) => candidate.field === field);
-  return problem === undefined ? null : recipeSentence(problem);
+  if (problem === undefined) return null;
+  const waiting = problem.code === 'gas-missing' || problem.code === 'no-components' || problem.code === 'no-parents'
+    || (problem.code === 'entry' && problem.problem.code === 'empty');
+  return { sentence: recipeSentence(problem), waiting };
 }
 
 /** Element id of a field, so that a list of problems can lead to it. */

@@ -125,8 +125,8 @@ function FieldFrame(props: {
   return (
     <div className={bare ? 'field bare' : 'field'}>
       <label htmlFor={id} className={bare ? 'visually-hidden' : 'label'}>{label}</label>
-      {children({ id, 'aria-invalid': problem !== null, 'aria-describedby': problem === null ? undefined : problemId })}
-      {problem !== null && <p id={problemId} className="problem">{problem}</p>}
+      {children({ id, 'aria-invalid': problem !== null && !problem.waiting, 'aria-describedby': problem === null ? undefined : problemId })}
+      {problem !== null && <p id={problemId} className={problem.waiting ? 'problem waiting' : 'problem'}>{problem.sentence}</p>}
     </div>
   );
 }

@@ -10,10 +10,14 @@ export interface Scale {
   readonly barometer: Pascal;
 }
 
-/** Scale of a step's gauge. */
-export function scaleOf(job: Job, gaugeKey: string | null): Scale {
+/** Below this a stop without a gauge is shown in mbar absolute: as bar gauge it would be little more than its sign. */
+const SMALL_STOP = 2e5;
+
+/** Scale of the gauge a pressure is read on; without one, a scale that shows it to four digits or so. */
+export function scaleOf(job: Job, gaugeKey: string | null, pressure: Pascal): Scale {
   const gauge = job.gauges.find((candidate) => candidate.key === gaugeKey);
   const { barometer } = job.conditions;
+  if (gauge === undefined && pressure < SMALL_STOP) return { unit: 'mbar', reference: 'absolute', resolution: 10, barometer };
   if (gauge === undefined) return { unit: 'bar', reference: 'gauge', resolution: 1000, barometer };
   return { unit: gauge.unit, reference: gauge.reference, resolution: gauge.resolution, barometer };
 }

@@ -14,7 +14,7 @@ const PressureTemperatureChart = lazy(() => import('../../charts/PressureTempera
 export function FinishedView({ answer }: { readonly answer: PlanAnswer }) {
   if (!answer.ok) return <NotPlanned problems={answer.reason.problems} />;
   const plan = answer.value;
-  const scale = { ...scaleOf(plan.job, plan.steps.at(-1)?.gauge ?? null) };
+  const scale = scaleOf(plan.job, plan.steps.at(-1)?.gauge ?? null, plan.finished.pressure);
   return (
     <>
       <Composition plan={plan} />

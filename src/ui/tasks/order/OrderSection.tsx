@@ -53,7 +53,7 @@ function ComponentRow({ line, index, plan }: { readonly line: OrderLine; readonl
       <td>
         <TextField
           bare align="right" field={`${path}.tolerance`} label={`preparation tolerance of ${name}`} value={line.tolerance}
-          placeholder={isBalanceText(line.amount) ? '' : 'none'} onChange={(tolerance) => { edit({ tolerance }); }}
+          placeholder={isBalanceText(line.amount) ? '' : '—'} onChange={(tolerance) => { edit({ tolerance }); }}
         />
       </td>
       <td className="number"><PlannedCell plan={plan} gasText={line.gas} /></td>

@@ -52,9 +52,10 @@ export function ParentsSection() {
 
 /** One press adds pure parents for every ordered gas that nothing supplies. */
 function MissingParents() {
-  const missing = useWorkspaceState((state) => state.answer);
+  const answer = useWorkspaceState((state) => state.answer);
+  const recipe = useWorkspaceState((state) => state.recipe);
   const actions = useActions();
-  const gases = parentForMissing(missing);
+  const gases = parentForMissing(answer, recipe);
   if (gases.length === 0) return null;
   return (
     <button type="button" className="plain strong" onClick={() => { for (const parent of gases) actions.run(addParent(parent)); }}>

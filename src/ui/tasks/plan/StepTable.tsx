@@ -62,7 +62,7 @@ function StartCell({ plan }: { readonly plan: Plan }) {
   if (plan.start === null) return <td>vacuum</td>;
   const { job, start } = plan;
   const finest = job.gauges.filter((gauge) => gauge.fullScale >= start.pressure).sort((a, b) => a.accuracy - b.accuracy)[0];
-  const scale = scaleOf(job, finest?.key ?? null);
+  const scale = scaleOf(job, finest?.key ?? null, start.pressure);
   return <td><span className="stop-start">{pressureNumber(start.pressure, scale)}</span><span className="unit">{scaleLabel(scale)}</span></td>;
 }
 
@@ -72,7 +72,7 @@ function StopRow({ plan, start, small = false }: { readonly plan: Plan; readonly
       <th scope="row">stop at the gas temperature</th>
       {start}
       {plan.steps.map((step) => {
-        const scale = scaleOf(plan.job, step.gauge);
+        const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
         return (
           <td key={step.number}>
             <WorkingFigure className={small ? '' : 'act'} explain={() => explainStop(plan, step)}>
@@ -118,7 +118,7 @@ function StripRow({ plan, hasStart }: { readonly plan: Plan; readonly hasStart: 
       <th scope="row">{common ? `stop at ${temperatures}` : 'stop if colder, if warmer'}</th>
       {hasStart && <td />}
       {plan.steps.map((step, index) => {
-        const scale = scaleOf(plan.job, step.gauge);
+        const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
         return (
           <td key={step.number}>
             {neighbours[index]!.map((point) => (
@@ -139,7 +139,7 @@ function IdealRow({ plan, hasStart }: { readonly plan: Plan; readonly hasStart: 
       <th scope="row">ideal gas would say</th>
       {hasStart && <td />}
       {plan.steps.map((step) => {
-        const scale = scaleOf(plan.job, step.gauge);
+        const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
         return (
           <td key={step.number}>
             {step.idealStop === null ? 'no plan' : (

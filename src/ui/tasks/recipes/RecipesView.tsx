@@ -10,7 +10,9 @@ export function RecipesView({ onOpened }: { readonly onOpened: () => void }) {
   const library = useWorkspaceState((state) => state.library);
   const openId = useWorkspaceState((state) => state.openId);
   const actions = useActions();
-  const create = () => { if (actions.create({ ...emptyRecipe }).ok) onOpened(); };
+  const { gauges, conditions } = useWorkspaceState((state) => state.recipe);
+  // The laboratory's gauges and room are the same for the next recipe.
+  const create = () => { if (actions.create({ ...emptyRecipe, gauges, conditions }).ok) onOpened(); };
   return (
     <section aria-labelledby="recipes-title">
       <h2 id="recipes-title">Recipes</h2>

@@ -18,7 +18,7 @@ export function FillSheet({ program }: { readonly program: string }) {
   const plan = answer.value;
   const { contentId, revision } = sheetIdentity({ recipe, issued });
   return (
-    <article className="sheet" aria-label="Fill sheet">
+    <article className={isDense(plan) ? 'sheet dense' : 'sheet'} aria-label="Fill sheet">
       <header className="sheet-head">
         <div>
           <h1>Fill sheet</h1>
@@ -43,6 +43,12 @@ export function FillSheet({ program }: { readonly program: string }) {
   );
 }
 
+/** Whether the boxes must be lower for everything to stay on one page. */
+function isDense({ steps, findings }: Plan): boolean {
+  // A step takes the room of two findings; sixteen fit on Letter with boxes of full height.
+  return 2 * steps.length + findings.filter(({ verdict }) => verdict !== 'note').length > 15;
+}
+
 function Holds({ plan }: { readonly plan: Plan }) {
   const overrides = plan.job.overrides;
   const holds = plan.findings.filter((finding) => finding.verdict === 'hold');
@@ -64,7 +70,7 @@ function Holds({ plan }: { readonly plan: Plan }) {
 function OrderAndCylinder({ plan }: { readonly plan: Plan }) {
   const { job } = plan;
   const { cylinder, order } = job;
-  const scale = scaleOf(job, plan.steps.at(-1)?.gauge ?? null);
+  const scale = scaleOf(job, plan.steps.at(-1)?.gauge ?? null, order.fillPressure);
   const at = (pressure: typeof cylinder.workingPressure) => (pressure === null ? 'not stated' : `${pressureNumber(pressure, scale)} ${scaleLabel(scale)}`);
   return (
     <section className="sheet-top">
@@ -126,7 +132,7 @@ function Steps({ plan }: { readonly plan: Plan }) {
 }
 
 function StepRows({ plan, step, byMass }: { readonly plan: Plan; readonly step: PlanStep; readonly byMass: boolean }) {
-  const scale = scaleOf(plan.job, step.gauge);
+  const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
   const gauge = plan.job.gauges.find((candidate) => candidate.key === step.gauge);
   const { balanceResolution } = plan.job.conditions;
   return (
@@ -160,7 +166,7 @@ function StepRows({ plan, step, byMass }: { readonly plan: Plan; readonly step: 
 }
 
 function Finished({ plan }: { readonly plan: Plan }) {
-  const scale = scaleOf(plan.job, plan.steps.at(-1)?.gauge ?? null);
+  const scale = scaleOf(plan.job, plan.steps.at(-1)?.gauge ?? null, plan.finished.pressure);
   const pressures = plan.final.developedPressures.map(({ temperature, pressure }) => `${formatTemperature(temperature)}: ${pressureNumber(pressure, scale)}`);
   return (
     <p className="sheet-finished">
