@@ -13,6 +13,8 @@ export default defineConfig({
   fullyParallel: true,
   forbidOnly: true,
   retries: 0,
+  // The longest takes a quarter of this on an idle two-core machine.
+  timeout: 120_000,
   reporter: [['list'], ['json', { outputFile: 'node_modules/.cache/results/playwright.json' }]],
   use: {
     baseURL: address,
