@@ -17,6 +17,15 @@ export default defineConfig({
   build: {
     target: 'es2023',
     sourcemap: true,
+    // Every browser this program is tested in preloads modules by itself.
+    modulePreload: { polyfill: false },
+    rolldownOptions: {
+      output: {
+        // One chunk for what the first plan computes with: a lazily loaded view that shares a part of it would otherwise
+        // cut it into pieces that compress worse. What comes later keeps its own chunks.
+        codeSplitting: { groups: [{ name: 'react', test: /node_modules\/(react|react-dom|scheduler)\// }, { name: 'core', test: /src\/(units|thermo|blending)\/(?!.*(beyond-gerg|helmholtz|peng-robinson|data\/pairs|working\/explain|proof|uncertainty))/ }] },
+      },
+    },
     // The size check follows the imports it lists.
     manifest: true,
     // Inlined files would be data addresses, which the content policy forbids for scripts and styles.
@@ -28,5 +37,6 @@ export default defineConfig({
     include: ['tests/**/*.test.ts', 'tests/**/*.test.tsx'],
     exclude: ['tests/journeys/**'],
     environment: 'node',
+    setupFiles: ['tests/all-gases.ts'],
   },
 });

@@ -19,7 +19,8 @@ export interface GasRecord {
   readonly molarMass: { readonly value: KilogramPerMole; readonly standardUncertainty: KilogramPerMole };
   readonly criticalTemperature: Kelvin;
   readonly criticalPressure: Pascal;
-  readonly triplePoint: Kelvin;
+  /** Left out where no trusted value was found. */
+  readonly triplePoint?: Kelvin;
   /** At 101.325 kPa; a gas that sublimes has none. */
   readonly normalBoilingPoint?: Kelvin;
   readonly acentricFactor: number;
@@ -57,7 +58,7 @@ function makeRecord(id: GasId): GasRecord {
     molarMass: { value: kilogramPerMole(molarMass * 1e-3), standardUncertainty: kilogramPerMole(uncertainty * 1e-3) },
     criticalTemperature: kelvin(row.criticalTemperature_K),
     criticalPressure: pascal(row.criticalPressure_kPa * 1e3),
-    triplePoint: kelvin(row.triplePoint_K),
+    ...(row.triplePoint_K === undefined ? {} : { triplePoint: kelvin(row.triplePoint_K) }),
     ...(row.normalBoilingPoint_K === undefined ? {} : { normalBoilingPoint: kelvin(row.normalBoilingPoint_K) }),
     acentricFactor: row.acentricFactor,
   };

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { demoRecipes, explainComponent, explainIdealStop, explainMass, explainStop, planRecipe, recipeSentence } from '../../src/blending/index.ts';
+import { demoRecipes, planRecipe, recipeSentence } from '../../src/blending/index.ts';
+import { explainComponent, explainIdealStop, explainMass, explainStop } from '../../src/blending/working/explain.ts';
 import type { PlanAnswer, Recipe } from '../../src/blending/index.ts';
 
 /** Texts that people, other programs and accidents put into fields. */

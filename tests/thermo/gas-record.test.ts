@@ -7,11 +7,12 @@ describe('findGas', () => {
     ['124-38-9', 'carbon dioxide'], ['124‑38‑9', 'carbon dioxide'], ['R744', 'carbon dioxide'],
     ['CO', 'carbon monoxide'], ['butane', 'n-butane'], ['iC4', 'isobutane'], ['C₂H₆', 'ethane'],
     ['hydrogen sulphide', 'hydrogen sulfide'], ['He', 'helium'], ['H2', 'hydrogen'],
+    ['R14', 'tetrafluoromethane'], ['EtOH', 'ethanol'], ['OCS', 'carbonyl sulfide'], ['N2O4', 'nitrogen dioxide'], ['butylene', '1-butene'],
   ])('finds %j', (text, gas) => {
     expect(findGas(text)).toBe(gas);
   });
 
-  it.each(['', 'unobtainium', 'carbon', 'C4H10', 'C5H12', 'constructor'])('finds nothing for %j', (text) => {
+  it.each(['', 'unobtainium', 'carbon', 'C4H10', 'C5H12', 'C4H8', 'constructor'])('finds nothing for %j', (text) => {
     expect(findGas(text)).toBeUndefined();
   });
 
@@ -46,7 +47,10 @@ describe('gasRecord', () => {
 
   it.each(gasIds)('%s: the published formula weight agrees with the molar mass within 0.03 %%', (gas) => {
     // Standard atomic weights, rounded; sulfur varies by 230 parts in a million.
-    const weights: Readonly<Record<string, number>> = { H: 1.008, He: 4.0026, C: 12.011, N: 14.007, O: 15.999, S: 32.06, Ar: 39.948 };
+    const weights: Readonly<Record<string, number>> = {
+      H: 1.008, D: 2.0141, He: 4.0026, C: 12.011, N: 14.007, O: 15.999, F: 18.998, Ne: 20.18, Si: 28.085, P: 30.974, S: 32.06, Cl: 35.45,
+      Ar: 39.948, As: 74.922, Kr: 83.798, Xe: 131.29,
+    };
     const { formula, molarMass } = gasRecord(gas);
     const sum = [...formula.matchAll(/([A-Z][a-z]?)(\d*)/g)]
       .reduce((total, [, symbol, count]) => total + weights[symbol!]! * (count === '' ? 1 : Number(count)), 0);

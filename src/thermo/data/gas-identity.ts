@@ -7,26 +7,15 @@
  * from air. Critical point, acentric factor and triple point: fluid files of
  * CoolProp, each after the reference equation of the gas. Normal boiling point:
  * equal fugacity at 101.325 kPa with that equation; carbon dioxide has none, it
- * sublimes.
+ * sublimes. The files of the inorganic and organic gases name what differs.
  */
+import type { GasIdentityRow } from '../records.ts';
+import { inorganicGases } from './gas-identity-inorganic.ts';
+import { organicGases } from './gas-identity-organic.ts';
 import type { GasId } from './gases.ts';
+import type { KunzWagnerGas } from './kunz-wagner-2012/gases.ts';
 
-/** One gas in the units of its sources. */
-export interface GasIdentityRow {
-  readonly name: string;
-  readonly formula: string;
-  readonly cas: string;
-  readonly synonyms: readonly string[];
-  /** [value, standard uncertainty], g/mol. */
-  readonly molarMass_g_per_mol: readonly [number, number];
-  readonly criticalTemperature_K: number;
-  readonly criticalPressure_kPa: number;
-  readonly triplePoint_K: number;
-  readonly normalBoilingPoint_K?: number;
-  readonly acentricFactor: number;
-}
-
-export const gasIdentity: Readonly<Record<GasId, GasIdentityRow>> = {
+const gergGases: Readonly<Record<KunzWagnerGas, GasIdentityRow>> = {
   methane: {
     name: 'Methane', formula: 'CH4', cas: '74-82-8', synonyms: ['R50'],
     molarMass_g_per_mol: [16.0425, 0.00066],
@@ -133,3 +122,6 @@ export const gasIdentity: Readonly<Record<GasId, GasIdentityRow>> = {
     criticalTemperature_K: 150.687, criticalPressure_kPa: 4863, triplePoint_K: 83.806, normalBoilingPoint_K: 87.302, acentricFactor: -0.00219,
   },
 };
+
+/** Every gas. */
+export const gasIdentity: Readonly<Record<GasId, GasIdentityRow>> = { ...gergGases, ...inorganicGases, ...organicGases };

@@ -1,4 +1,8 @@
-/** Every gas the program has an equation for, by the key used in all its files. */
+/**
+ * Every gas the program has an equation for, by the key used in all its files:
+ * those of GERG-2008, those with another published Helmholtz equation, those
+ * left to Peng–Robinson.
+ */
 export const gasIds = [
   'methane',
   'nitrogen',
@@ -21,6 +25,43 @@ export const gasIds = [
   'hydrogen sulfide',
   'helium',
   'argon',
+  'neon',
+  'krypton',
+  'xenon',
+  'neopentane',
+  'toluene',
+  'carbonyl sulfide',
+  'nitrous oxide',
+  'acetone',
+  'deuterium',
+  'ethylene',
+  'propylene',
+  'isobutene',
+  '1-butene',
+  'benzene',
+  'sulfur dioxide',
+  'ammonia',
+  'hydrogen chloride',
+  'chlorine',
+  'sulfur hexafluoride',
+  'tetrafluoromethane',
+  'r134a',
+  'ethylene oxide',
+  'methanol',
+  'ethanol',
+  'trifluoromethane',
+  'vinyl chloride',
+  'acetylene',
+  'methyl mercaptan',
+  'nitric oxide',
+  'nitrogen dioxide',
+  'hydrogen fluoride',
+  'hydrogen cyanide',
+  'phosphine',
+  'arsine',
+  'silane',
+  'formaldehyde',
+  '1,3-butadiene',
 ] as const;
 
 /** The key of one gas. */

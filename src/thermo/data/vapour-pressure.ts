@@ -1,13 +1,23 @@
 /**
- * Vapour pressure of each gas: ln(p/pᵣ) = (Tᵣ/T) Σ n θ^t with θ = 1 − T/Tᵣ.
+ * Vapour pressure of the gases of GERG-2008 (the others: `vapour-pressure-beyond-gerg.ts`): ln(p/pᵣ) = (Tᵣ/T) Σ n θ^t with θ = 1 − T/Tᵣ.
  *
  * Sources: `CoolProp` rows are the ancillary fits of its fluid files, made to the
  * reference equation named on the row. `Poling` rows are Wagner constants of
  * B. E. Poling, J. M. Prausnitz, J. P. O'Connell, The Properties of Gases and
  * Liquids, 5th ed. (2001); they stand where the ancillary fit misses its own
- * equation (2 % for n-hexane, 10 % for n-octane at the cold end).
+ * equation (2 % for n-hexane, 10 % for n-octane at the cold end). `McGarry` rows:
+ * J. McGarry, Ind. Eng. Chem. Process Des. Dev. 22 (1983) 313. `VDI` rows: VDI Heat
+ * Atlas, 2nd ed., Springer (2010). `CoolProp` rows after argon are rounded to ten
+ * digits. Methanol's fit differs from its equation by 0.5 %.
+ *
+ * Phosphine, arsine and silane have no measured curve near room temperature at
+ * hand: their rows are fitted (within 0.6 %) to the vapour pressure of the
+ * Peng–Robinson equation and *estimated*. At the normal boiling point they lie
+ * within 4 % (PH3), 2 % (AsH3) and 9 % (SiH4) of 101.325 kPa; statements for
+ * phosphine at room temperature disagree (3.9 to 4.2 MPa). The curve of nitrogen
+ * dioxide is the total pressure over the liquid of NO2 and N2O4.
  */
-import type { GasId } from './gases.ts';
+import type { KunzWagnerGas } from './kunz-wagner-2012/gases.ts';
 
 /** One vapour-pressure correlation with the range its fit covers. */
 export interface VapourPressureRow {
@@ -19,7 +29,7 @@ export interface VapourPressureRow {
   readonly source: string;
 }
 
-export const vapourPressureRows: Readonly<Record<GasId, VapourPressureRow>> = {
+export const vapourPressureRows: Readonly<Record<KunzWagnerGas, VapourPressureRow>> = {
   methane: {
     reducingTemperature_K: 190.564, reducingPressure_kPa: 4599.2, range_K: [90.6941, 190.564], source: 'CoolProp, Setzmann and Wagner 1991',
     terms: [[-0.36511751226395045, 0.935], [-7.477611035699516, 1.03], [2.8218785804602344, 1.204], [-0.3138277099613026, 3.176], [-14.181166200304828, 5.616], [13.10811727353235, 5.744]],

@@ -15,6 +15,15 @@ import type { Mixture } from './mixture.ts';
  * infinite dilution. `residual` holds the derivatives of αʳ at the same state.
  */
 export function lnFugacityCoefficients(mixture: Mixture, delta: number, tau: number, residual: Float64Array): Float64Array {
+  const lnZ = Math.log1p(residual[DELTA]!);
+  return residualPotentials(mixture, delta, tau, residual).map((potential) => potential - lnZ);
+}
+
+/**
+ * ∂(nαʳ)/∂nᵢ = ln φᵢ + ln Z of every gas: the residual chemical potential at T and ρ,
+ * in RT. It keeps its digits in a liquid of low pressure, where Z is next to nothing.
+ */
+export function residualPotentials(mixture: Mixture, delta: number, tau: number, residual: Float64Array): Float64Array {
   const { x, parts } = mixture;
   const size = x.length;
   const byVolume = new Float64Array(size);
@@ -26,7 +35,7 @@ export function lnFugacityCoefficients(mixture: Mixture, delta: number, tau: num
   const volumeSum = weightedSum(x, byVolume);
   const temperatureSum = weightedSum(x, byTemperature);
   const fractionSum = weightedSum(x, byFraction);
-  const common = residual[ALPHA]! + residual[DELTA]! - Math.log1p(residual[DELTA]!) - fractionSum;
+  const common = residual[ALPHA]! + residual[DELTA]! - fractionSum;
   const volumeFactor = residual[DELTA]! / mixture.reducingVolume;
   const temperatureFactor = residual[TAU]! / mixture.reducingTemperature;
   const result = new Float64Array(size);

@@ -1,63 +1,62 @@
 /** Assembles the published records of a list of gases into one mixture. */
 import type { GasId } from '../data/gases.ts';
-import { departures } from '../data/kunz-wagner-2012/departures.ts';
-import { pairRows } from '../data/kunz-wagner-2012/pairs.ts';
-import { pureEquation } from '../data/kunz-wagner-2012/pure.ts';
 import { Mixture } from '../mixture/mixture.ts';
 import type { PairDeparture } from '../mixture/mixture.ts';
 import { reducingTemperature, reducingVolume } from '../mixture/reducing.ts';
 import type { ReducingPair } from '../mixture/reducing.ts';
-import type { DepartureFunction, PairOrigin } from '../records.ts';
-import { buildTermTable, departureTerms, pureTerms } from '../terms/term-table.ts';
+import type { PairOrigin } from '../records.ts';
+import { buildTermTable } from '../terms/term-table.ts';
+import type { Term } from '../terms/term-table.ts';
+import { cubicParameters, meanParameters, publishedPair } from './pairs.ts';
+import type { PairSource, PublishedPair } from './pairs.ts';
+import { pureGas } from './pure-gas.ts';
+import type { PureGas } from './pure-gas.ts';
 
 /** A pair of the mixture with where its parameters come from. */
 export interface CompiledPair extends ReducingPair {
   readonly origin: PairOrigin;
 }
 
-/** A mixture together with what is known about its pairs. */
+/** A mixture together with what is known about its gases and pairs. */
 export interface CompiledMixture {
   readonly mixture: Mixture;
+  readonly gases: readonly PureGas[];
   readonly pairs: readonly CompiledPair[];
 }
 
-/** Compiles the model of these gases, in this order; a checked list. */
-export function compileMixture(gases: readonly GasId[]): CompiledMixture {
-  const equations = gases.map(pureEquation);
-  const pairs = pairsOf(gases);
-  const { functions, departures: pairDepartures } = departuresOf(gases);
-  const mixture = new Mixture({
-    table: buildTermTable([...equations.map(pureTerms), ...functions.map(departureTerms)]),
-    departures: pairDepartures,
-    reducingVolume: reducingVolume(equations.map((equation) => 1e-3 / equation.criticalDensity_mol_per_dm3), pairs),
-    reducingTemperature: reducingTemperature(equations.map((equation) => equation.criticalTemperature_K), pairs),
-    molarMasses: equations.map((equation) => equation.molarMass_g_per_mol * 1e-3),
-  });
-  return { mixture, pairs };
-}
-
-/** The pairs of the list by position; the betas stay with the gas the row names first. */
-function pairsOf(gases: readonly GasId[]): CompiledPair[] {
+/** Compiles the model of these gases, in this order; a checked list whose equations are loaded. */
+export function compileMixture(ids: readonly GasId[], source: PairSource = publishedPair): CompiledMixture {
+  const gases = ids.map(pureGas);
   const pairs: CompiledPair[] = [];
-  for (const [firstGas, secondGas, betaV, gammaV, betaT, gammaT, origin] of pairRows) {
-    const first = gases.indexOf(firstGas);
-    const second = gases.indexOf(secondGas);
-    if (first < 0 || second < 0) continue;
-    pairs.push({ first, second, betaV, gammaV, betaT, gammaT, origin });
+  const functions: (readonly Term[])[] = gases.map(({ terms }) => terms);
+  const departures: PairDeparture[] = [];
+  for (let i = 0; i < ids.length; i++) {
+    for (let j = i + 1; j < ids.length; j++) {
+      const published = source(ids[i]!, ids[j]!);
+      // The betas stay with the gas the row names first.
+      const turned = published !== undefined && published.row[0] !== ids[i];
+      const [first, second] = turned ? [j, i] : [i, j];
+      pairs.push(compiledPair(gases, first, second, published));
+      if (published?.departure === undefined) continue;
+      const { factor, terms } = published.departure;
+      if (!functions.includes(terms)) functions.push(terms);
+      departures.push({ first, second, factor, function: functions.indexOf(terms) });
+    }
   }
-  return pairs;
+  const mixture = new Mixture({
+    table: buildTermTable(functions),
+    departures,
+    reducingVolume: reducingVolume(gases.map((gas) => gas.reducingVolume), pairs),
+    reducingTemperature: reducingTemperature(gases.map((gas) => gas.reducingTemperature), pairs),
+    molarMasses: gases.map((gas) => gas.molarMass),
+  });
+  return { mixture, gases, pairs };
 }
 
-/** The departure functions the list needs, each once, and the pairs that use them. */
-function departuresOf(gases: readonly GasId[]): { functions: DepartureFunction[]; departures: PairDeparture[] } {
-  const functions: DepartureFunction[] = [];
-  const found: PairDeparture[] = [];
-  for (const departure of departures) {
-    const first = gases.indexOf(departure.first);
-    const second = gases.indexOf(departure.second);
-    if (first < 0 || second < 0) continue;
-    if (!functions.includes(departure.function)) functions.push(departure.function);
-    found.push({ first, second, factor: departure.factor, function: gases.length + functions.indexOf(departure.function) });
-  }
-  return { functions, departures: found };
+function compiledPair(gases: readonly PureGas[], first: number, second: number, published: PublishedPair | undefined): CompiledPair {
+  const [a, b] = [gases[first]!, gases[second]!];
+  const [betaV, gammaV, betaT, gammaT] = published === undefined ? meanParameters(a, b)
+    : published.k12 === undefined ? [published.row[2], published.row[3], published.row[4], published.row[5]]
+      : cubicParameters(a, b, published.k12);
+  return { first, second, betaV, gammaV, betaT, gammaT, origin: published?.row[6] ?? 'mean' };
 }

@@ -1,19 +1,26 @@
-/** The real-gas model: GERG-2008 compiled for one list of gases. */
+/** The real-gas model: the multi-fluid Helmholtz energy compiled for one list of gases. */
 import { fail, molePerCubicMetre, ok, pascal } from '../../units/index.ts';
 import type { Kelvin, MolePerCubicMetre, Outcome, Pascal } from '../../units/index.ts';
+import { settleNitrogenDioxide } from '../association.ts';
 import { GAS_CONSTANT, GERG2008_GAS_CONSTANT } from '../constants.ts';
-import type { Composition, DensitySolution, RangeVerdict, ThermoModel, ThermoReason, ThermoState } from '../contract.ts';
-import { gasIds } from '../data/gases.ts';
+import type { Composition, DensitySolution, ModelTrust, RangeVerdict, ThermoModel, ThermoReason, ThermoState } from '../contract.ts';
 import type { GasId } from '../data/gases.ts';
-import { idealGasParts } from '../data/kunz-wagner-2012/ideal.ts';
-import { lnFugacityCoefficients } from '../mixture/fugacity.ts';
+import { lnFugacityCoefficients, residualPotentials } from '../mixture/fugacity.ts';
+import type { EquationRange } from '../records.ts';
+import type { DensityResult } from '../solve/density-result.ts';
 import { solveGasDensity } from '../solve/gas-density.ts';
+import { solveLiquidDensity } from '../solve/liquid-density.ts';
 import { assembleState } from '../state/properties.ts';
 import { rangeVerdict } from '../state/range.ts';
 import { idealGasEvaluator } from '../terms/ideal-part.ts';
+import { DELTA, DELTA2 } from '../terms/merged-terms.ts';
 import { compileMixture } from './compile.ts';
 import type { CompiledMixture } from './compile.ts';
-import { compositionFault, densityFault, gasListFault, pressureFault, temperatureFault } from './input-checks.ts';
+import { pairSource, publishedPair } from './pairs.ts';
+import type { PairSource, PublishedPair } from './pairs.ts';
+import { densityUncertainty, modelClassOf } from './trust.ts';
+import { compositionFault, densityFault, pressureFault, temperatureFault } from './input-checks.ts';
+import { modelFault } from './library.ts';
 
 /** Which gas constant a model uses. */
 export interface RealModelOptions {
@@ -26,12 +33,15 @@ class RealModel implements ThermoModel {
   readonly gasConstant: number;
   readonly #compiled: CompiledMixture;
   readonly #idealPart: ReturnType<typeof idealGasEvaluator>;
+  /** The range of a pure gas with an equation of its own. */
+  readonly #ownRange: EquationRange | undefined;
 
-  constructor(gases: readonly GasId[], gasConstant: number) {
+  constructor(gases: readonly GasId[], gasConstant: number, pairs: PairSource) {
     this.gases = gases;
     this.gasConstant = gasConstant;
-    this.#compiled = compileMixture(gases);
-    this.#idealPart = idealGasEvaluator(gases.map((gas) => idealGasParts[gas]), gasConstant);
+    this.#compiled = compileMixture(gases, pairs);
+    this.#idealPart = idealGasEvaluator(this.#compiled.gases.map((gas) => gas.ideal), gasConstant);
+    this.#ownRange = gases.length === 1 ? this.#compiled.gases[0]!.range : undefined;
   }
 
   pressure(temperature: Kelvin, density: MolePerCubicMetre, x: Composition): Outcome<Pascal, ThermoReason> {
@@ -54,13 +64,26 @@ class RealModel implements ThermoModel {
     const { mixture } = this.#compiled;
     const tau = mixture.setTemperature(temperature);
     const target = pressure / (this.gasConstant * temperature);
-    const { end, density, iterations, residual } = solveGasDensity(mixture.terms, tau, mixture.reducingVolume, target);
-    switch (end) {
-      case 'found': return ok({ density: molePerCubicMetre(density), iterations, residual });
-      case 'no-gas-root': return fail({ code: 'no-gas-root', temperature, pressure });
-      case 'not-converged': return fail({ code: 'not-converged', iterations, residual });
-      case 'breaks-down': return fail({ code: 'equation-breaks-down', temperature, density });
-    }
+    return densityOutcome(solveGasDensity(mixture.terms, tau, mixture.reducingVolume, target), temperature, pressure);
+  }
+
+  liquidDensity(temperature: Kelvin, pressure: Pascal, x: Composition): Outcome<DensitySolution, ThermoReason> {
+    const fault = this.#fault(temperature, x) ?? pressureFault(pressure);
+    if (fault) return fail(fault);
+    const { mixture } = this.#compiled;
+    const tau = mixture.setTemperature(temperature);
+    const target = pressure / (this.gasConstant * temperature);
+    return densityOutcome(solveLiquidDensity(mixture.terms, tau, mixture.reducingVolume, target), temperature, pressure);
+  }
+
+  residualPotentials(temperature: Kelvin, density: MolePerCubicMetre, x: Composition): Outcome<Float64Array, ThermoReason> {
+    const fault = this.#fault(temperature, x) ?? densityFault(density);
+    if (fault) return fail(fault);
+    const { mixture } = this.#compiled;
+    const delta = density * mixture.reducingVolume;
+    const residual = mixture.residual(temperature, delta);
+    const values = residualPotentials(mixture, delta, mixture.reducingTemperature / temperature, residual);
+    return 1 + 2 * residual[DELTA]! + residual[DELTA2]! > 0 && values.every(Number.isFinite) ? ok(values) : fail({ code: 'equation-breaks-down', temperature, density });
   }
 
   state(temperature: Kelvin, density: MolePerCubicMetre, x: Composition): Outcome<ThermoState, ThermoReason> {
@@ -72,6 +95,7 @@ class RealModel implements ThermoModel {
     const residual = mixture.residual(temperature, delta);
     return assembleState({
       temperature, density, residual,
+      range: this.#ownRange,
       gasConstant: this.gasConstant,
       molarMass: mixture.molarMass,
       ideal: this.#idealPart(temperature, density, x),
@@ -85,7 +109,7 @@ class RealModel implements ThermoModel {
   }
 
   range(temperature: Kelvin, pressure: Pascal): RangeVerdict {
-    return rangeVerdict(temperature, pressure);
+    return rangeVerdict(temperature, pressure, this.#ownRange);
   }
 
   secondVirialCoefficient(temperature: Kelvin, x: Composition): Outcome<number, ThermoReason> {
@@ -98,11 +122,22 @@ class RealModel implements ThermoModel {
     return Number.isFinite(value) ? ok(value) : fail({ code: 'equation-breaks-down', temperature, density: 0 });
   }
 
+  molecules(amounts: Float64Array, temperature: Kelvin, volume: number): Float64Array {
+    return settleNitrogenDioxide(this.gases, amounts, temperature, volume);
+  }
+
+  trust(density: MolePerCubicMetre, x: Composition): Outcome<ModelTrust, ThermoReason> {
+    const fault = compositionFault(x, this.gases) ?? densityFault(density);
+    if (fault) return fail(fault);
+    const relativeStandardUncertainty = densityUncertainty(this.#compiled, density, x);
+    return Number.isFinite(relativeStandardUncertainty)
+      ? ok({ ...modelClassOf(this.#compiled, this.gases, x), relativeStandardUncertainty })
+      : fail({ code: 'density-invalid', value: density });
+  }
+
   modelClass(x: Composition): ReturnType<ThermoModel['modelClass']> {
-    const estimatedPairs = this.#compiled.pairs
-      .filter(({ first, second, origin }) => origin !== 'fitted' && x[first]! > 0 && x[second]! > 0)
-      .map(({ first, second }) => [this.gases[first]!, this.gases[second]!] as const);
-    return { class: estimatedPairs.length === 0 ? 'fitted' : 'estimated', estimatedPairs };
+    const { class: backing, estimatedPairs } = modelClassOf(this.#compiled, this.gases, x);
+    return { class: backing, estimatedPairs };
   }
 
   /** Checks T and x, and binds x; a composition already bound was checked then. */
@@ -117,24 +152,49 @@ class RealModel implements ThermoModel {
   }
 }
 
+/** The answer of a density search as an outcome. */
+function densityOutcome(result: DensityResult, temperature: number, pressure: number): Outcome<DensitySolution, ThermoReason> {
+  const { end, density, iterations, residual } = result;
+  switch (end) {
+    case 'found': return ok({ density: molePerCubicMetre(density), iterations, residual });
+    case 'no-gas-root':
+    case 'no-liquid-root': return fail({ code: end, temperature, pressure });
+    case 'not-converged': return fail({ code: 'not-converged', iterations, residual });
+    case 'breaks-down': return fail({ code: 'equation-breaks-down', temperature, density });
+  }
+}
+
 /** Compiled models by gas constant and gases, in order of last use. */
 const compiled = new Map<string, RealModel>();
 const MOST_COMPILED = 64;
 
 /**
- * The GERG-2008 model (Kunz and Wagner, J. Chem. Eng. Data 57 (2012) 3032) of a
- * list of gases. Compiled once for a list; fails with `no-gases`, `unknown-gas`
- * or `duplicate-gas`.
+ * The multi-fluid model of a list of gases: GERG-2008 (Kunz and Wagner, J. Chem.
+ * Eng. Data 57 (2012) 3032) for its 21 gases, other published equations for the
+ * rest (`data/`). Compiled once for a list; fails with `no-gases`, `unknown-gas`,
+ * `duplicate-gas`, or `equations-not-loaded` before `loadAllGases` has settled.
  */
 export function realModel(gases: readonly GasId[], options: RealModelOptions = {}): Outcome<ThermoModel, ThermoReason> {
-  const fault = gasListFault(gases, (gas) => (gasIds as readonly string[]).includes(gas));
+  const fault = modelFault(gases);
   if (fault) return fail(fault);
-  const gasConstant = options.gasConstant === 'gerg2008' ? GERG2008_GAS_CONSTANT : GAS_CONSTANT;
+  const gasConstant = gasConstantOf(options);
   const key = [gasConstant, ...gases].join('|');
-  const model = compiled.get(key) ?? new RealModel([...gases], gasConstant);
+  const model = compiled.get(key) ?? new RealModel([...gases], gasConstant, publishedPair);
   compiled.delete(key);
   compiled.set(key, model);
   const [oldest] = compiled.keys();
   if (compiled.size > MOST_COMPILED && oldest !== undefined) compiled.delete(oldest);
   return ok(model);
+}
+
+/** The same with these pairs in the place of the published ones, to check against other programs; a pair left out is estimated. */
+export function realModelWithPairs(
+  gases: readonly GasId[], pairs: readonly PublishedPair[], options: RealModelOptions = {},
+): Outcome<ThermoModel, ThermoReason> {
+  const fault = modelFault(gases);
+  return fault ? fail(fault) : ok(new RealModel([...gases], gasConstantOf(options), pairSource(pairs)));
+}
+
+function gasConstantOf({ gasConstant }: RealModelOptions): number {
+  return gasConstant === 'gerg2008' ? GERG2008_GAS_CONSTANT : GAS_CONSTANT;
 }

@@ -1,7 +1,7 @@
-/** What both density searches answer, and when they stop. */
+/** What the density searches answer, and when they stop. */
 
 /** How a search ended. */
-export type DensityEnd = 'found' | 'no-gas-root' | 'not-converged' | 'breaks-down';
+export type DensityEnd = 'found' | 'no-gas-root' | 'no-liquid-root' | 'not-converged' | 'breaks-down';
 
 export interface DensityResult {
   readonly end: DensityEnd;
@@ -20,5 +20,5 @@ export const NEARLY = 1e-9;
 
 /** Whether p is met as well as rounding in Z allows; `residual` is |p(ρ) − p|/p. */
 export function isMet(residual: number, z: number): boolean {
-  return residual * z <= ROUNDING * (1 + Math.abs(z - 1));
+  return residual < Infinity && residual * z <= ROUNDING * (1 + Math.abs(z - 1));
 }

@@ -17,7 +17,7 @@ import { NearCriticalSearch } from './near-critical.ts';
  * steadily above its own critical temperature, and the departure functions are
  * small beside them (checked by a scan of random mixtures in the tests).
  */
-const STEADY_BELOW_TAU = 0.95;
+export const STEADY_BELOW_TAU = 0.95;
 
 const MOST_ITERATIONS = 100;
 

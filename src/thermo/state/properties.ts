@@ -8,6 +8,7 @@ import {
 } from '../../units/index.ts';
 import type { Outcome } from '../../units/index.ts';
 import type { ThermoReason, ThermoState } from '../contract.ts';
+import type { EquationRange } from '../records.ts';
 import { ALPHA, DELTA, DELTA2, DELTA_TAU, TAU, TAU2 } from '../terms/merged-terms.ts';
 import type { IdealGasValues } from '../terms/ideal-part.ts';
 import { rangeVerdict } from './range.ts';
@@ -26,6 +27,8 @@ export interface StateIngredients {
   /** αʳ and its derivatives in the order of `terms/merged-terms`. */
   readonly residual: Float64Array;
   readonly lnFugacityCoefficients: Float64Array;
+  /** The range of a pure gas's own equation. */
+  readonly range?: EquationRange | undefined;
 }
 
 /** Assembles the state, or says that the equation is unstable or overflows there. */
@@ -61,7 +64,7 @@ export function assembleState(from: StateIngredients): Outcome<ThermoState, Ther
     speedOfSound: metrePerSecond(Math.sqrt(rt / molarMass * (stiffness + thermal * thermal / isochoric))),
     jouleThomsonCoefficient: -(delta1 + delta2 + deltaTau) / (density * gasConstant * isobaric * stiffness),
     pressureByDensity: rt * stiffness,
-    range: rangeVerdict(temperature, pressure),
+    range: rangeVerdict(temperature, pressure, from.range),
   };
   return pressure > 0 && stiffness > 0 && allFinite(state)
     ? ok(state)

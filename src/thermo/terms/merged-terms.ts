@@ -6,6 +6,7 @@
  * One object is a workspace: its owner runs the stages in order.
  */
 import { FamilyFactors } from './family-factors.ts';
+import { TemperatureFactors } from './temperature-factors.ts';
 import type { TermTable } from './term-table.ts';
 
 /** Positions in the array of results of `evaluateAll`. */
@@ -25,18 +26,16 @@ export class MergedTerms {
   // Active slots, grouped by active kernel, grouped by active family.
   #slotCount = 0;
   readonly #slotCoefficient: Float64Array;
-  readonly #slotPower: Int32Array;
+  readonly #slotFactor: Int32Array;
   #kernelCount = 0;
   readonly #kernelSlotEnd: Int32Array;
   readonly #kernelDegree: Int32Array;
   #familyCount = 0;
   readonly #familyKernelEnd: Int32Array;
   readonly #families: FamilyFactors;
-  // Active powers of τ.
-  #powerCount = 0;
-  readonly #powerExponent: Float64Array;
-  readonly #powerValue: Float64Array;
-  readonly #powerOfTemperature: Int32Array;
+  // Active factors of τ, and where each factor of the table stands among them.
+  readonly #temperatures: TemperatureFactors;
+  readonly #openTemperature: Int32Array;
   // Kernel coefficients at the present τ, with one and two factors from ∂/∂τ.
   readonly #kernel0: Float64Array;
   readonly #kernel1: Float64Array;
@@ -48,14 +47,13 @@ export class MergedTerms {
     this.#table = table;
     this.#merged = new Float64Array(slots);
     this.#slotCoefficient = new Float64Array(slots);
-    this.#slotPower = new Int32Array(slots);
+    this.#slotFactor = new Int32Array(slots);
     this.#kernelSlotEnd = new Int32Array(kernels);
     this.#kernelDegree = new Int32Array(kernels);
     this.#familyKernelEnd = new Int32Array(table.families.length);
     this.#families = new FamilyFactors(table.families.length, table.largestDegree);
-    this.#powerExponent = new Float64Array(table.temperatureExponents.length);
-    this.#powerValue = new Float64Array(table.temperatureExponents.length);
-    this.#powerOfTemperature = new Int32Array(table.temperatureExponents.length);
+    this.#temperatures = new TemperatureFactors(table.temperatureExponents.length);
+    this.#openTemperature = new Int32Array(table.temperatureExponents.length);
     this.#kernel0 = new Float64Array(kernels);
     this.#kernel1 = new Float64Array(kernels);
     this.#kernel2 = new Float64Array(kernels);
@@ -63,7 +61,7 @@ export class MergedTerms {
 
   /** Stage 1: the weight of each function of the table. */
   setWeights(weights: Float64Array): void {
-    const { functions, slotKernel, slotTemperature, kernelFamily, kernelDegree, temperatureExponents, families } = this.#table;
+    const { functions, slotKernel, slotTemperature, kernelFamily, kernelDegree, temperatureExponents, temperatureShapes, families } = this.#table;
     const merged = this.#merged.fill(0);
     for (let f = 0; f < functions.length; f++) {
       const weight = weights[f]!;
@@ -71,9 +69,10 @@ export class MergedTerms {
       const { slots, n } = functions[f]!;
       for (let k = 0; k < slots.length; k++) merged[slots[k]!]! += weight * n[k]!;
     }
-    this.#powerOfTemperature.fill(-1);
+    this.#openTemperature.fill(-1);
+    this.#temperatures.close();
     this.#families.close();
-    this.#slotCount = this.#kernelCount = this.#familyCount = this.#powerCount = 0;
+    this.#slotCount = this.#kernelCount = this.#familyCount = 0;
     let kernel = -1;
     let family = -1;
     for (let s = 0; s < merged.length; s++) {
@@ -89,11 +88,10 @@ export class MergedTerms {
         this.#familyKernelEnd[this.#familyCount - 1] = this.#kernelCount;
       }
       const temperature = slotTemperature[s]!;
-      if (this.#powerOfTemperature[temperature] === -1) {
-        this.#powerOfTemperature[temperature] = this.#powerCount;
-        this.#powerExponent[this.#powerCount++] = temperatureExponents[temperature]!;
+      if (this.#openTemperature[temperature] === -1) {
+        this.#openTemperature[temperature] = this.#temperatures.open(temperatureExponents[temperature]!, temperatureShapes[temperature]!);
       }
-      this.#slotPower[this.#slotCount] = this.#powerOfTemperature[temperature]!;
+      this.#slotFactor[this.#slotCount] = this.#openTemperature[temperature]!;
       this.#slotCoefficient[this.#slotCount++] = merged[s]!;
       this.#kernelSlotEnd[this.#kernelCount - 1] = this.#slotCount;
     }
@@ -101,33 +99,34 @@ export class MergedTerms {
 
   /** Stage 2 for `evaluate`: the inverse reduced temperature. */
   setTau(tau: number): void {
-    this.#setPowers(tau);
+    this.#temperatures.set(tau);
     const coefficient = this.#slotCoefficient;
-    const slotPower = this.#slotPower;
-    const value = this.#powerValue;
+    const slotFactor = this.#slotFactor;
+    const value = this.#temperatures.value;
     const slotEnd = this.#kernelSlotEnd;
     const kernel0 = this.#kernel0;
     const kernelCount = this.#kernelCount;
     for (let k = 0, s = 0; k < kernelCount; k++) {
       const end = slotEnd[k]!;
       let sum = 0;
-      for (; s < end; s++) sum += coefficient[s]! * value[slotPower[s]!]!;
+      for (; s < end; s++) sum += coefficient[s]! * value[slotFactor[s]!]!;
       kernel0[k] = sum;
     }
   }
 
   /** Stage 2 for `evaluateAll`: the same with the derivatives by τ. */
   setTauWithDerivatives(tau: number): void {
-    this.#setPowers(tau);
+    this.#temperatures.setWithDerivatives(tau);
+    const { value, first, second } = this.#temperatures;
     for (let k = 0, s = 0; k < this.#kernelCount; k++) {
       const end = this.#kernelSlotEnd[k]!;
       let sum0 = 0, sum1 = 0, sum2 = 0;
       for (; s < end; s++) {
-        const t = this.#powerExponent[this.#slotPower[s]!]!;
-        const term = this.#slotCoefficient[s]! * this.#powerValue[this.#slotPower[s]!]!;
+        const factor = this.#slotFactor[s]!;
+        const term = this.#slotCoefficient[s]! * value[factor]!;
         sum0 += term;
-        sum1 += t * term;
-        sum2 += t * (t - 1) * term;
+        sum1 += first[factor]! * term;
+        sum2 += second[factor]! * term;
       }
       this.#kernel0[k] = sum0;
       this.#kernel1[k] = sum1;
@@ -135,30 +134,24 @@ export class MergedTerms {
     }
   }
 
-  #setPowers(tau: number): void {
-    const logTau = Math.log(tau);
-    const exponent = this.#powerExponent;
-    const value = this.#powerValue;
-    const powerCount = this.#powerCount;
-    for (let k = 0; k < powerCount; k++) value[k] = Math.exp(exponent[k]! * logTau);
-  }
-
   /**
    * The first two terms of Z = 1 + b δ + c δ² + …, after a stage 2; read from
    * `virial1` and `virial2`.
    */
   expandAtZero(): void {
-    const { factorAtZero, slopeAtZero } = this.#families;
+    const { factorAtZero, slopeAtZero, curveAtZero } = this.#families;
     let b = 0, c = 0;
     for (let f = 0, k = 0; f < this.#familyCount; f++) {
       const end = this.#familyKernelEnd[f]!;
-      let linear = 0, square = 0;
+      let constant = 0, linear = 0, square = 0;
       for (; k < end; k++) {
-        if (this.#kernelDegree[k] === 1) linear += this.#kernel0[k]!;
-        else if (this.#kernelDegree[k] === 2) square += this.#kernel0[k]!;
+        const d = this.#kernelDegree[k]!;
+        if (d === 1) linear += this.#kernel0[k]!;
+        else if (d === 2) square += this.#kernel0[k]!;
+        else if (d === 0) constant += this.#kernel0[k]!;
       }
-      b += linear * factorAtZero[f]!;
-      c += 2 * (square + linear * slopeAtZero[f]!) * factorAtZero[f]!;
+      b += (linear + constant * slopeAtZero[f]!) * factorAtZero[f]!;
+      c += 2 * (square + linear * slopeAtZero[f]! + constant * curveAtZero[f]!) * factorAtZero[f]!;
     }
     this.virial1 = b;
     this.virial2 = c;

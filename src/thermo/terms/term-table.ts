@@ -2,7 +2,7 @@
  * Lays the terms of many functions of (δ, τ) out in one flat table.
  *
  * Published equations share exponents: most gases of GERG-2008 use one of two
- * forms. A term without its coefficient is a *slot* δ^d τ^t exp(h(δ)); slots
+ * forms. A term without its coefficient is a *slot* δ^d τ^t s(τ) exp(h(δ)); slots
  * with the same d and h form a *kernel*, kernels with the same h a *family*.
  * At a given composition the coefficients of all functions merge per slot, at a
  * given temperature per kernel, and what is left is a short polynomial in δ for
@@ -10,20 +10,35 @@
  */
 import type { DepartureFunction, PureEquation } from '../records.ts';
 
-/** The exponential factor exp(h(δ)) of a term. */
+/** The factor exp(h(δ)) of a term; for the two cubic kinds the factor itself. */
 export type Damping =
   | { readonly kind: 'none' }
-  /** h = −δ^c. */
-  | { readonly kind: 'power'; readonly c: number }
+  /** h = −g δ^c; g is 1 where it is left out. */
+  | { readonly kind: 'power'; readonly c: number; readonly g?: number }
   /** h = −η(δ−ε)² − β(δ−γ). */
-  | { readonly kind: 'exponential'; readonly eta: number; readonly epsilon: number; readonly beta: number; readonly gamma: number };
+  | { readonly kind: 'exponential'; readonly eta: number; readonly epsilon: number; readonly beta: number; readonly gamma: number }
+  /** −ln(1 − bδ)/δ: the space the molecules of a cubic equation take; infinite from its pole bδ = 1 on. */
+  | { readonly kind: 'covolume'; readonly b: number }
+  /** ln[(1 + (1+√2)bδ)/(1 + (1−√2)bδ)]/(2√2 δ): the attraction of the Peng–Robinson equation. */
+  | { readonly kind: 'attraction'; readonly b: number };
 
-/** One term n δ^d τ^t exp(h(δ)). */
+/** The factor s(τ) of a term beside its power of τ. */
+export type TemperatureShape =
+  | { readonly kind: 'none' }
+  /** exp(−β(τ−γ)²). */
+  | { readonly kind: 'gaussian'; readonly beta: number; readonly gamma: number }
+  /** exp(1/(b + β(τ−γ)²)). */
+  | { readonly kind: 'bell'; readonly b: number; readonly beta: number; readonly gamma: number }
+  /** exp(−g τ^l). */
+  | { readonly kind: 'exponential'; readonly g: number; readonly l: number };
+
+/** One term n δ^d τ^t s(τ) exp(h(δ)); s is 1 where it is left out. */
 export interface Term {
   readonly n: number;
   readonly d: number;
   readonly t: number;
   readonly damping: Damping;
+  readonly shape?: TemperatureShape;
 }
 
 /** One function as coefficients of slots. */
@@ -33,8 +48,10 @@ export interface SlotRow {
 }
 
 export interface TermTable {
-  /** Distinct exponents of τ. */
+  /** Exponent of τ of each distinct factor τ^t s(τ). */
   readonly temperatureExponents: Float64Array;
+  /** s(τ) of each of them. */
+  readonly temperatureShapes: readonly TemperatureShape[];
   /** Damping of each family. */
   readonly families: readonly Damping[];
   /** Family of each kernel; kernels stand in the order of their families. */
@@ -43,7 +60,7 @@ export interface TermTable {
   readonly kernelDegree: Int32Array;
   /** Kernel of each slot; slots stand in the order of their kernels. */
   readonly slotKernel: Int32Array;
-  /** Index into `temperatureExponents` of each slot. */
+  /** Index into `temperatureExponents` and `temperatureShapes` of each slot. */
   readonly slotTemperature: Int32Array;
   readonly largestDegree: number;
   /** The functions given, in their order. */
@@ -73,20 +90,21 @@ export function buildTermTable(functions: readonly (readonly Term[])[]): TermTab
   const families = distinct(all, (term) => term.familyKey);
   const kernels = distinct(all, (term) => term.kernelKey);
   const slots = distinct(all, (term) => term.slotKey);
-  const temperatures = [...new Set(all.map((term) => term.t))].sort((a, b) => a - b);
+  const temperatures = [...new Map(all.map((term) => [term.temperatureKey, term])).values()].sort((a, b) => a.t - b.t);
 
   const familyIndex = new Map(families.map((term, index) => [term.familyKey, index]));
   const kernelIndex = new Map(kernels.map((term, index) => [term.kernelKey, index]));
   const slotIndex = new Map(slots.map((term, index) => [term.slotKey, index]));
-  const temperatureIndex = new Map(temperatures.map((t, index) => [t, index]));
+  const temperatureIndex = new Map(temperatures.map((term, index) => [term.temperatureKey, index]));
 
   return {
-    temperatureExponents: Float64Array.from(temperatures),
+    temperatureExponents: Float64Array.from(temperatures, (term) => term.t),
+    temperatureShapes: temperatures.map((term) => term.shape ?? { kind: 'none' }),
     families: families.map((term) => term.damping),
     kernelFamily: Int32Array.from(kernels, (term) => familyIndex.get(term.familyKey)!),
     kernelDegree: Int32Array.from(kernels, (term) => term.d),
     slotKernel: Int32Array.from(slots, (term) => kernelIndex.get(term.kernelKey)!),
-    slotTemperature: Int32Array.from(slots, (term) => temperatureIndex.get(term.t)!),
+    slotTemperature: Int32Array.from(slots, (term) => temperatureIndex.get(term.temperatureKey)!),
     largestDegree: all.reduce((largest, { d, damping }) => Math.max(largest, d, damping.kind === 'power' ? damping.c : 0), 1),
     functions: keyed.map((terms) => ({
       slots: Int32Array.from(terms, (term) => slotIndex.get(term.slotKey)!),
@@ -99,7 +117,8 @@ interface KeyedTerm extends Term {
   readonly familyKey: string;
   readonly kernelKey: string;
   readonly slotKey: string;
-  /** Damping, d, t: what the table is sorted by. */
+  readonly temperatureKey: string;
+  /** Damping, d, t, s: what the table is sorted by. */
   readonly order: readonly number[];
 }
 
@@ -107,14 +126,28 @@ function withKeys(term: Term): KeyedTerm {
   const numbers = dampingNumbers(term.damping);
   const familyKey = numbers.join(',');
   const kernelKey = `${familyKey};${term.d}`;
-  return { ...term, familyKey, kernelKey, slotKey: `${kernelKey};${term.t}`, order: [...numbers, term.d, term.t] };
+  const shape = shapeNumbers(term.shape);
+  const temperatureKey = [term.t, ...shape].join(',');
+  return { ...term, familyKey, kernelKey, temperatureKey, slotKey: `${kernelKey};${temperatureKey}`, order: [...numbers, term.d, term.t, ...shape] };
 }
 
 function dampingNumbers(damping: Damping): readonly number[] {
   switch (damping.kind) {
     case 'none': return [0];
-    case 'power': return [1, damping.c];
+    case 'power': return [1, damping.c, damping.g ?? 1];
     case 'exponential': return [2, damping.eta, damping.epsilon, damping.beta, damping.gamma];
+    case 'covolume': return [3, damping.b];
+    case 'attraction': return [4, damping.b];
+  }
+}
+
+function shapeNumbers(shape: TemperatureShape | undefined): readonly number[] {
+  switch (shape?.kind) {
+    case undefined:
+    case 'none': return [0];
+    case 'gaussian': return [1, shape.beta, shape.gamma];
+    case 'bell': return [2, shape.b, shape.beta, shape.gamma];
+    case 'exponential': return [3, shape.g, shape.l];
   }
 }
 
@@ -129,7 +162,7 @@ function distinct(terms: readonly KeyedTerm[], keyOf: (term: KeyedTerm) => strin
 }
 
 function byOrder(a: KeyedTerm, b: KeyedTerm): number {
-  for (let k = 0; k < a.order.length; k++) {
+  for (let k = 0; k < Math.min(a.order.length, b.order.length); k++) {
     const difference = a.order[k]! - b.order[k]!;
     if (difference !== 0) return difference;
   }

@@ -40,8 +40,13 @@ describe('vapourPressureRule', () => {
   });
 
   it('gives no limit when a gas is below the range of its correlation', () => {
-    expect(vapourPressureRule(['nitrogen', 'water'], [0.999, 0.001], celsius(-10)))
-      .toMatchObject({ ok: false, reason: { code: 'below-vapour-pressure-range', gas: 'water' } });
+    expect(vapourPressureRule(['nitrogen', 'benzene'], [0.999, 0.001], celsius(-10)))
+      .toMatchObject({ ok: false, reason: { code: 'below-vapour-pressure-range', gas: 'benzene' } });
+  });
+
+  it('judges moisture below 0 °C against ice: 100 µmol/mol may stand about 26 bar at −10 °C', () => {
+    // Ice at −10 °C has 259.9 Pa (value from memory).
+    expect(given(vapourPressureRule(['nitrogen', 'water'], [0.9999, 0.0001], celsius(-10))).limit / 2.599e6).toBeCloseTo(1, 3);
   });
 
   it('says what is wrong with the input', () => {

@@ -3,9 +3,9 @@ import { describe, expect, it } from 'vitest';
 import { FunctionValues } from '../../../src/thermo/terms/function-values.ts';
 import { ALPHA, DELTA, DELTA2, DELTA_TAU, MergedTerms, TAU, TAU2 } from '../../../src/thermo/terms/merged-terms.ts';
 import { buildTermTable } from '../../../src/thermo/terms/term-table.ts';
-import type { Term } from '../../../src/thermo/terms/term-table.ts';
+import type { Damping, TemperatureShape, Term } from '../../../src/thermo/terms/term-table.ts';
 
-/** Two functions that share slots, with every kind of damping. */
+/** Three functions that share slots, with every kind of damping and of temperature factor. */
 const functions: readonly (readonly Term[])[] = [
   [
     { n: 0.6, d: 1, t: 0.125, damping: { kind: 'none' } },
@@ -20,20 +20,49 @@ const functions: readonly (readonly Term[])[] = [
     { n: -0.5, d: 1, t: -1, damping: { kind: 'exponential', eta: 1, epsilon: 0.5, beta: 1, gamma: 0.5 } },
     { n: 0.25, d: 2, t: 7.85, damping: { kind: 'exponential', eta: 0, epsilon: 0.5, beta: 3, gamma: 0.5 } },
   ],
+  [
+    { n: 0.7, d: 0, t: 3, damping: { kind: 'power', c: 2, g: 0.998 } },
+    { n: -0.7, d: 0, t: 3, damping: { kind: 'none' } },
+    { n: 0.2, d: 0, t: 1, damping: { kind: 'power', c: 1, g: 1.5 } },
+    { n: -0.3, d: 1, t: 1.2, damping: { kind: 'exponential', eta: 1.1, epsilon: 0.8, beta: 0, gamma: 0 }, shape: { kind: 'gaussian', beta: 0.9, gamma: 1.2 } },
+    { n: 0.4, d: 2, t: 1.2, damping: { kind: 'exponential', eta: 2.8, epsilon: 0.4, beta: 0, gamma: 0 }, shape: { kind: 'bell', b: 1.2, beta: 0.4, gamma: 1.1 } },
+    { n: 0.1, d: 1, t: 0, damping: { kind: 'power', c: 2, g: 4 }, shape: { kind: 'exponential', g: -1.3, l: 2 } },
+    { n: 1, d: 1, t: 0, damping: { kind: 'covolume', b: 0.253 } },
+    { n: -5.9, d: 1, t: 0.5, damping: { kind: 'attraction', b: 0.253 } },
+  ],
 ];
 const table = buildTermTable(functions);
 
+function factorOf(damping: Damping, delta: number): number {
+  switch (damping.kind) {
+    case 'none': return 1;
+    case 'power': return Math.exp(-(damping.g ?? 1) * delta ** damping.c);
+    case 'exponential': return Math.exp(-damping.eta * (delta - damping.epsilon) ** 2 - damping.beta * (delta - damping.gamma));
+    case 'covolume': return -Math.log(1 - damping.b * delta) / delta;
+    case 'attraction': {
+      const u = damping.b * delta;
+      return Math.log((1 + (1 + Math.SQRT2) * u) / (1 + (1 - Math.SQRT2) * u)) / (2 * Math.SQRT2 * delta);
+    }
+  }
+}
+
+function shapeOf(shape: TemperatureShape = { kind: 'none' }, tau: number): number {
+  switch (shape.kind) {
+    case 'none': return 1;
+    case 'gaussian': return Math.exp(-shape.beta * (tau - shape.gamma) ** 2);
+    case 'bell': return Math.exp(1 / (shape.b + shape.beta * (tau - shape.gamma) ** 2));
+    case 'exponential': return Math.exp(-shape.g * tau ** shape.l);
+  }
+}
+
 /** The definition, term by term. */
 function value(terms: readonly Term[], delta: number, tau: number): number {
-  return terms.reduce((sum, { n, d, t, damping }) => {
-    const h = damping.kind === 'none' ? 0
-      : damping.kind === 'power' ? -(delta ** damping.c)
-        : -damping.eta * (delta - damping.epsilon) ** 2 - damping.beta * (delta - damping.gamma);
-    return sum + n * delta ** d * tau ** t * Math.exp(h);
+  return terms.reduce((sum, { n, d, t, damping, shape }) => {
+    return sum + n * delta ** d * tau ** t * factorOf(damping, delta) * shapeOf(shape, tau);
   }, 0);
 }
 
-const weights = Float64Array.of(0.7, 0.21);
+const weights = Float64Array.of(0.7, 0.21, 0.4);
 function sum(delta: number, tau: number): number {
   return functions.reduce((total, terms, k) => total + weights[k]! * value(terms, delta, tau), 0);
 }
@@ -58,9 +87,9 @@ const states = { delta: fc.double({ min: 0.05, max: 2.5, noNaN: true }), tau: fc
 
 describe('term table', () => {
   it('keeps shared slots once', () => {
-    expect(table.slotKernel).toHaveLength(7);
-    expect(table.temperatureExponents).toHaveLength(7);
-    expect(table.families).toHaveLength(6);
+    expect(table.slotKernel).toHaveLength(15);
+    expect(table.temperatureExponents).toHaveLength(14);
+    expect(table.families).toHaveLength(13);
   });
 });
 
@@ -112,7 +141,7 @@ describe('merged terms', () => {
   it('forget the functions of an earlier weighting', () => {
     const merged = new MergedTerms(table);
     merged.setWeights(weights);
-    merged.setWeights(Float64Array.of(0, 1));
+    merged.setWeights(Float64Array.of(0, 1, 0));
     const out = new Float64Array(6);
     merged.setTauWithDerivatives(0.9);
     merged.evaluateAll(0.7, out);
