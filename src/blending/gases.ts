@@ -12,13 +12,13 @@ export interface GasLabel {
 
 /** Isomers share a formula; a label that did not tell them apart would let one be filled for the other. */
 const ISOMER_PREFIX: Readonly<Partial<Record<GasId, string>>> = {
-  'n-butane': 'n-', isobutane: 'i-', 'n-pentane': 'n-', isopentane: 'i-',
+  'n-butane': 'n-', isobutane: 'i-', 'n-pentane': 'n-', isopentane: 'i-', neopentane: 'neo-', '1-butene': '1-', isobutene: 'i-',
 };
 
 /** Label of one gas. */
 export function gasLabel(id: GasId): GasLabel {
   const { name, formulaText } = gasRecord(id);
-  return { id, name: name.charAt(0).toLowerCase() + name.slice(1), formula: (ISOMER_PREFIX[id] ?? '') + formulaText };
+  return { id, name: name.replace(/[A-Z](?=[a-z])/, (capital) => capital.toLowerCase()), formula: (ISOMER_PREFIX[id] ?? '') + formulaText };
 }
 
 /** Every gas that can be computed, in the order of the model. */

@@ -1,6 +1,7 @@
 import { celsius } from '../units/index.ts';
 import type { Pascal } from '../units/index.ts';
-import type { CylinderState, Job, Mixing, MixingSplit, Plan, PlanStep, StripPoint } from '../blending/index.ts';
+import { lowestGasTemperature, modelName } from '../blending/index.ts';
+import type { CylinderState, Job, LargestFill, Mixing, MixingSplit, Plan, PlanStep, StripPoint } from '../blending/index.ts';
 
 /** A plan as plain JSON, every number with its unit in its name. */
 export function planJson(plan: Plan, recipeId: string): object {
@@ -9,7 +10,10 @@ export function planJson(plan: Plan, recipeId: string): object {
     ok: true,
     recipeId,
     gases: job.gases,
-    model: { equation: 'GERG-2008', class: plan.modelClass, estimatedPairs: plan.estimatedPairs, gasConstant_J_per_molK: plan.gasConstant },
+    model: {
+      equation: modelName(plan.job.gases), class: plan.modelClass, estimatedPairs: plan.estimatedPairs, cubicGases: plan.cubicGases,
+      relativeStandardUncertainty: plan.modelUncertainty, gasConstant_J_per_molK: plan.gasConstant,
+    },
     barometer_bar: job.conditions.barometer / 1e5,
     start: plan.start === null ? null : stateJson(job, plan.start),
     steps: plan.steps.map((step) => stepJson(plan, step)),
@@ -30,12 +34,43 @@ export function planJson(plan: Plan, recipeId: string): object {
     },
     meanMolarMass_g_per_mol: final.meanMolarMass * 1e3,
     totalMass_g: final.totalMass * 1e3,
-    fillingRatio_kg_per_kg: final.fillingRatio,
+    // A blend that separates has no filling ratio as a gas.
+    fillingRatio_kg_per_kg: plan.phase.finished.phase === 'unstable' ? null : final.fillingRatio,
     massDensity_kg_per_m3: final.massDensity,
     developedPressures: final.developedPressures.map((point) => pointJson(job, point)),
     releasedVolume_m3: final.releasedVolume,
+    phase: phaseJson(plan),
     mixing: plan.mixing.ok ? mixingJson(job, plan.mixing.value) : { ok: false, reason: plan.mixing.reason },
     findings: plan.findings,
+  };
+}
+
+function phaseJson(plan: Plan): object {
+  const { job, phase } = plan;
+  const lowest = lowestGasTemperature(plan);
+  const { coldest } = phase;
+  return {
+    start: phase.start,
+    steps: phase.steps,
+    finished: phase.finished,
+    lowestGasTemperature: lowest.ok
+      ? { ok: true, value: lowest.value === null ? null : { ...pointJson(job, lowest.value), forming: lowest.value.forming } }
+      : { ok: false, reason: lowest.reason },
+    largestFill: coldest === null ? null : {
+      coldest_C: celsius(coldest.temperature),
+      ...(coldest.largestFill.ok ? { ok: true, value: largestFillJson(job, coldest.largestFill.value) } : { ok: false, reason: coldest.largestFill.reason }),
+      searchedTo_bar_absolute: coldest.searchedTo / 1e5,
+      slightlyColder: coldest.slightlyColder,
+    },
+  };
+}
+
+function largestFillJson(job: Job, largest: LargestFill | null): object | null {
+  return largest === null ? null : {
+    ...pressureJson(job, largest.pressure),
+    dewPressure_bar_absolute: largest.dewPressure / 1e5,
+    forming: largest.forming,
+    mayFreeze: largest.mayFreeze,
   };
 }
 

@@ -1,7 +1,7 @@
 import { fail, kelvin, molePerCubicMetre, ok, pascal } from '../units/index.ts';
 import type { Outcome } from '../units/index.ts';
-import { findGas, phaseHint, realModel } from '../thermo/index.ts';
-import type { GasId, ThermoReason, ThermoState } from '../thermo/index.ts';
+import { findGas, modelName, phaseOf, realModel } from '../thermo/index.ts';
+import type { GasId, Phase, ThermoModel, ThermoReason, ThermoState } from '../thermo/index.ts';
 import type { CommandAnswer } from './run.ts';
 import { readFlags } from './flags.ts';
 import type { GasConstant } from './flags.ts';
@@ -56,8 +56,15 @@ function answer(state: unknown, gasConstant: GasConstant): object {
     ? model.value.state(temperature, molePerCubicMetre((request.value.density_mol_per_L ?? NaN) * 1e3), x)
     : model.value.stateAtPressure(temperature, pascal(request.value.pressure_kPa * 1e3), x);
   if (!result.ok) return { ok: false, reason: result.reason };
-  const phase = phaseHint(model.value, temperature, result.value.pressure, x);
-  return { ok: true, phase, model: `GERG-2008, ${model.value.modelClass(x).class}`, ...propertiesJson(gases, result.value) };
+  const phase = phaseOfRoot(model.value, result.value, x);
+  return { ok: true, phase, model: `${modelName(gases)}, ${model.value.modelClass(x).class}`, ...propertiesJson(gases, result.value) };
+}
+
+/** The phase of a state, which may have been asked for by a density that no gas has. */
+function phaseOfRoot(model: ThermoModel, { temperature, pressure, density }: ThermoState, x: readonly number[]): Phase {
+  const phase = phaseOf(model, temperature, pressure, x);
+  const gas = model.density(temperature, pressure, x);
+  return gas.ok && Math.abs(gas.value.density / density - 1) > 1e-6 ? 'not tested' : phase;
 }
 
 function propertiesJson(gases: readonly GasId[], state: ThermoState): object {

@@ -13,7 +13,7 @@ const COMMANDS: Readonly<Record<string, (input: string, flags: readonly string[]
   properties: propertiesCommand,
 };
 
-const USAGE = 'usage: npm run -s (plan|properties) -- [--gas-constant gerg2008] FILE   (- reads standard input)';
+export const USAGE = 'usage: npm run -s (plan|properties) -- [--gas-constant gerg2008] FILE   (- reads standard input), or npm run -s proof';
 
 /** Runs one command line; everything it prints is one JSON value. */
 export function run(args: readonly string[]): CommandAnswer {

@@ -113,6 +113,8 @@ export interface WorkspaceActions {
   /** Notes that the sheet of the recipe as it is went out (printed or exported). */
   markIssued(): Issued;
   dismissNotice(): void;
+  /** Plans the open recipe again: what the planner knows has changed, the recipe has not. */
+  replan(): void;
   /** Flushes, stops timers and listening. */
   close(): void;
 }

@@ -36,6 +36,7 @@ export function createWorkspace<Answer>(deps: WorkspaceDependencies<Answer>): Wo
     flush: () => flush(session),
     markIssued: () => markIssued(session),
     dismissNotice: () => tell(session, null),
+    replan: () => showHistory(session, session.history),
     close() {
       flush(session);
       forgetPending(session);

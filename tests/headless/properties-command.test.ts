@@ -50,7 +50,7 @@ describe('properties', () => {
     [{ composition, temperature_K: 293.15 }, 'pressure-or-density'],
     [{ ...state, density_mol_per_L: 1 }, 'pressure-or-density'],
     [{ composition, temperature_K: 293.15, density_mol_per_L: 'thin' }, 'field-not-a-number'],
-    [{ ...state, composition: { xenon: 1 } }, 'unknown-gas'],
+    [{ ...state, composition: { phlogiston: 1 } }, 'unknown-gas'],
     [{ ...state, composition: {} }, 'no-gases'],
     [{ ...state, composition: { nitrogen: 0.5, N2: 0.5 } }, 'duplicate-gas'],
     [{ ...state, composition: { nitrogen: 0.5 } }, 'fractions-do-not-sum'],

@@ -1,55 +1,37 @@
-import { fail, ok, pascal } from '../../units/index.ts';
+import { ok } from '../../units/index.ts';
 import type { Kelvin, Outcome, Pascal } from '../../units/index.ts';
-import { vapourPressure, vapourPressureRule } from '../../thermo/index.ts';
+import { vapourPressureRule } from '../../thermo/index.ts';
 import type { GasId } from '../../thermo/index.ts';
 
-/**
- * Highest absolute pressure (Pa) at which no component reaches its vapour
- * pressure, 1/Σ(xᵢ/pᵢ,sat), with water below its triple point judged against
- * ice: a trace of moisture in every purity table would otherwise leave the
- * whole mixture unjudged below 0 °C.
- *
- * Fails with `no-condensable` (no limit needed), `below-vapour-pressure-range`
- * (another component would be solid when pure), or with what is wrong with the
- * composition or the temperature.
- */
-export function condensationLimit(
-  gases: readonly GasId[],
-  fractions: Float64Array,
-  temperature: Kelvin,
-): Outcome<Pascal, { readonly code: string }> {
-  const rule = vapourPressureRule(gases, fractions, temperature);
-  if (rule.ok) return ok(rule.value.limit);
-  if (rule.reason.code !== 'below-vapour-pressure-range') return rule;
-  let sum = 0;
-  for (const [i, gas] of gases.entries()) {
-    const content = fractions[i] ?? 0;
-    if (content <= 0) continue;
-    const saturation = vapourPressure(gas, temperature);
-    if (saturation.ok) sum += content / saturation.value;
-    else if (saturation.reason.code === 'below-vapour-pressure-range' && gas === 'water') sum += content / icePressure(temperature);
-    else if (saturation.reason.code !== 'above-critical-temperature') return saturation;
-  }
-  return sum > 0 ? ok(pascal(1 / sum)) : fail({ code: 'no-condensable' });
+/** The limit of the vapour pressure rule, and what it is made of. */
+export interface RuleLimit {
+  /** 1/Σ(xᵢ/pᵢ,sat), absolute. */
+  readonly limit: Pascal;
+  /** Pressure at which the water alone would use the rule up, absolute; Infinity without water. */
+  readonly waterLimit: number;
+  /** Condensable gases that use up at least a twentieth of the rule. */
+  readonly main: readonly GasId[];
 }
 
-/** Triple point of water. */
-const TRIPLE_K = 273.16;
-const TRIPLE_Pa = 611.657;
-/** Coefficient and exponent of each term of the sublimation equation. */
-const terms = [
-  [-21.2144006, 0.00333333333],
-  [27.3203819, 1.20666667],
-  [-6.1059813, 1.70333333],
-] as const;
+/** Share of the rule from which a gas is named. */
+const NAMED = 0.05;
 
 /**
- * Sublimation pressure of water ice, Pa, from 50 K to the triple point:
- * ln(p/p_t) = θ⁻¹ Σ aᵢ θ^bᵢ with θ = T/T_t. Source: IAPWS R14-08, from memory;
- * its check value at 230 K is in the tests.
+ * Highest absolute pressure (Pa) at which no component reaches its vapour pressure
+ * (water below 0 °C: that of ice), by the rule of ISO 6142.
+ *
+ * Fails with `no-condensable` (no limit needed), `below-vapour-pressure-range`
+ * (a component would be solid when pure), or with what is wrong with the
+ * composition or the temperature.
  */
-export function icePressure(temperature: Kelvin): Pascal {
-  const theta = temperature / TRIPLE_K;
-  const sum = terms.reduce((total, [a, b]) => total + a * theta ** b, 0);
-  return pascal(TRIPLE_Pa * Math.exp(sum / theta));
+export function condensationLimit(gases: readonly GasId[], fractions: Float64Array, temperature: Kelvin): Outcome<RuleLimit, { readonly code: string }> {
+  const rule = vapourPressureRule(gases, fractions, temperature);
+  if (!rule.ok) return rule;
+  const { limit, terms } = rule.value;
+  const water = terms.find(({ gas }) => gas === 'water');
+  return ok({
+    limit,
+    waterLimit: water === undefined ? Infinity : 1 / water.inverse,
+    main: terms.filter(({ inverse }) => inverse * limit >= NAMED).map(({ gas }) => gas),
+  });
 }

@@ -1,13 +1,14 @@
 import type { HazardRule } from './rule.ts';
 import { balanceTooCoarse } from './rules/balance.ts';
 import { carbonMonoxidePressure } from './rules/carbon-monoxide-pressure.ts';
-import { condensationAtStep, condensationInStorage } from './rules/condensation.ts';
+import { condensationAtStep } from './rules/condensation-step.ts';
+import { condensationInStorage } from './rules/condensation-storage.ts';
 import { contentsNotStated } from './rules/contents.ts';
 import { cylinderMaterial } from './rules/cylinder-material.ts';
 import { flammableGas } from './rules/flammable-gas.ts';
 import { fuelMeetsOxidiser } from './rules/fuel-meets-oxidiser.ts';
 import { fuelWithOxidiser } from './rules/fuel-with-oxidiser.ts';
-import { estimatedPairs, modelRange } from './rules/gas-model.ts';
+import { cubicGas, estimatedPairs, modelRange, nitrogenDioxidePairs } from './rules/gas-model.ts';
 import { gaugeOverRange, gaugeTooCoarse } from './rules/gauge.ts';
 import { oxidisingGas } from './rules/oxidising-gas.ts';
 import { oxygenCompressionHeat } from './rules/oxygen-compression.ts';
@@ -50,5 +51,7 @@ export const hazardRules: readonly HazardRule[] = [
   purityNotStated,
   modelRange,
   estimatedPairs,
+  cubicGas,
+  nitrogenDioxidePairs,
   developedPressures,
 ];

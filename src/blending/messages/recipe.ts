@@ -46,8 +46,13 @@ export function recipeSentence(problem: RecipeProblem): string {
     case 'fill-pressure-too-low':
       return `The cylinder already holds ${bar(problem.residualPressure, problem.barometer)} at the fill temperature: nothing can be added up to the fill pressure asked for.`;
     case 'no-state':
-      return `No answer for the ${problem.where}: ${thermoSentence(problem.reason)}`;
+      return `No answer for the ${problem.where}: ${thermoSentence(problem.reason)}${condensesSentence(problem.condenses ?? null)}`;
   }
+}
+
+/** A liquefied blend is refused as a whole: neither stop nor filling ratio of a gas would hold for it. */
+function condensesSentence(gas: GasId | null): string {
+  return gas === null ? '' : ` ${formula(gas)} condenses first: part of the blend would be liquid, for which no stop and no filling ratio is given. Lower the pressure or the content, or raise the temperature.`;
 }
 
 /** Why the thermodynamic model has no answer. */
@@ -67,8 +72,12 @@ export function thermoSentence(reason: ThermoReason): string {
       return 'the pressure is not one that can be computed with.';
     case 'density-invalid':
       return 'there is no gas to compute with.';
+    case 'not-compared':
+      return 'no comparison of models says how well it is known.';
     case 'unknown-gas':
       return `“${reason.gas}” is not in the model.`;
+    case 'equations-not-loaded':
+      return `the equations of ${formulas(reason.gases)} are still being loaded. If this stays, load the page again.`;
     case 'no-gases':
       return 'no gas is named.';
     case 'duplicate-gas':

@@ -4,6 +4,7 @@ import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { Job } from '../recipe/job.ts';
 import { cylinderVolume, settle, totalAmount } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
+import { unitDensity } from '../steps/unit-density.ts';
 import { leastSquares, nonNegativeLeastSquares } from './least-squares.ts';
 
 /** What goes in from each parent, and what was there before. */
@@ -80,9 +81,9 @@ function meetOrder(
   let used: readonly number[] | null = null;
   let previous = 0;
   for (let round = 0; round < MAXIMUM_ROUNDS; round++) {
-    const density = model.density(fillTemperature, fillPressure, fractions);
+    const density = unitDensity(model, fillTemperature, fillPressure, fractions);
     if (!density.ok) return fail({ code: 'state', where: 'finished gas', reason: density.reason });
-    const total = density.value.density * volume;
+    const total = density.value * volume;
     const equations = balanceEquations(job, residual, total);
     used ??= chooseParents(job, equations);
     const additions = solveBalance(job, equations, used, total);
@@ -107,13 +108,14 @@ function residualAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<
 function amountsAt(
   model: ThermoModel, vessel: Vessel, pressure: Pascal, temperature: Kelvin, fractions: Float64Array,
 ): Outcome<Float64Array, ThermoReason> {
-  const density = model.density(temperature, pressure, fractions);
+  const density = unitDensity(model, temperature, pressure, fractions);
   if (!density.ok) return density;
-  const total = density.value.density * cubicMetre(cylinderVolume(vessel, pressure, temperature));
+  const total = density.value * cubicMetre(cylinderVolume(vessel, pressure, temperature));
   return ok(fractions.map((x) => x * total));
 }
 
-function orderedFractions(job: Job): Float64Array {
+/** The composition ordered, aligned with `Job.gases`. */
+export function orderedFractions(job: Job): Float64Array {
   const fractions = new Float64Array(job.gases.length);
   for (const component of job.order.components) fractions[component.gas] = component.nominal;
   return fractions;
@@ -193,12 +195,39 @@ function explainMiss(
   job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array, { gases, finished }: Miss,
 ): AmountProblem {
   const sum = totalAmount(finished);
+  const beyond = gasesBeyondReach(job, residual);
+  if (beyond.length > 0) return { code: 'component-without-parent', gases: beyond, nearest: nearestWithout(job, residual, beyond, sum) };
   const nearest = { fractions: finished.map((amount) => amount / sum) };
-  const unsupplied = gases.filter((gas) => job.parents.every((parent) => parent.fractions[gas] === 0) && residual[gas] === 0);
-  if (unsupplied.length > 0) return { code: 'component-without-parent', gases: unsupplied, nearest };
   const share = largestResidualShare(job, model, vessel, residual);
   if (share === null) return { code: 'cannot-be-made', gases, nearest };
   return { code: 'residual-in-the-way', gases, ventTo: ventPressure(job, model, vessel, residual, share), nearest };
+}
+
+/** A source that holds less than this part of the ordered fraction is a trace, not a source. */
+const SOURCE = 0.1;
+
+/** Ordered gases that nothing supplies; a trace as an impurity does not count. */
+function gasesBeyondReach(job: Job, residual: Float64Array): number[] {
+  const held = totalAmount(residual);
+  return job.order.components
+    .filter(({ gas, nominal }) => {
+      const inResidual = held > 0 ? residual[gas]! / held : 0;
+      return Math.max(inResidual, ...job.parents.map((parent) => parent.fractions[gas]!)) < SOURCE * nominal;
+    })
+    .map(({ gas }) => gas);
+}
+
+/**
+ * The blend that meets the rest of the order. The gases out of reach are left out of
+ * the equations, or a trace of one in some parent would draw that parent in for it.
+ */
+function nearestWithout(job: Job, residual: Float64Array, beyond: readonly number[], total: number): NearestBlend {
+  const components = job.order.components.filter(({ gas }) => !beyond.includes(gas));
+  const reduced: Job = { ...job, order: { ...job.order, components } };
+  const equations = balanceEquations(reduced, residual, total);
+  const finished = finishedAmounts(job, solveBalance(job, equations, chooseParents(reduced, equations), total), residual);
+  const sum = totalAmount(finished);
+  return { fractions: finished.map((amount) => amount / sum) };
 }
 
 /** Largest part of the residual, below the whole, with which the order can be met; null: not even with none. */

@@ -1,4 +1,4 @@
-import { cubicMetre, fail, kelvin, kilogram, mole, ok } from '../../units/index.ts';
+import { cubicMetre, fail, fromCelsius, kilogram, mole, ok } from '../../units/index.ts';
 import type { Kelvin, Kilogram, Outcome } from '../../units/index.ts';
 import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { Job } from '../recipe/job.ts';
@@ -20,10 +20,13 @@ export interface FillStates {
   readonly steps: readonly BareStep[];
 }
 
-/** Why a state on the way has no answer: which step (from 1, 0 the residual) and what the model said. */
+/** Why a state on the way has no answer: which step (from 1, 0 the residual), what was in the cylinder, and what the model said. */
 export interface StateProblem {
   readonly code: 'step-state';
   readonly step: number;
+  readonly temperature: Kelvin;
+  /** mol, aligned with `Job.gases`. */
+  readonly amounts: Float64Array;
   readonly reason: ThermoReason;
 }
 
@@ -39,7 +42,9 @@ export function fillStates(
 ): Outcome<FillStates, StateProblem> {
   const { contents } = job.cylinder;
   const start = totalAmount(amounts.residual) > 0 ? settle(model, vessel, amounts.residual, contents.temperature) : null;
-  if (start !== null && !start.ok) return fail({ code: 'step-state', step: 0, reason: start.reason });
+  if (start !== null && !start.ok) {
+    return fail({ code: 'step-state', step: 0, temperature: contents.temperature, amounts: amounts.residual, reason: start.reason });
+  }
   const steps: BareStep[] = [];
   let held: Float64Array = Float64Array.from(amounts.residual);
   let before: CylinderState | null = start?.value ?? null;
@@ -48,10 +53,9 @@ export function fillStates(
     const parent = job.parents[index]!;
     const amount = amounts.additions[index]!;
     held = held.map((value, i) => value + amount * parent.fractions[i]!);
+    const stuck = { code: 'step-state', step: steps.length + 1, temperature: parent.gasTemperature, amounts: held } as const;
     const state = settle(model, vessel, held, parent.gasTemperature);
-    if (!state.ok) return fail({ code: 'step-state', step: steps.length + 1, reason: state.reason });
-    const strip = temperatureStrip(model, vessel, held);
-    if (!strip.ok) return fail({ code: 'step-state', step: steps.length + 1, reason: strip.reason });
+    if (!state.ok) return fail({ ...stuck, reason: state.reason });
     steps.push({
       number: steps.length + 1,
       parent: parent.key,
@@ -59,7 +63,7 @@ export function fillStates(
       mass: kilogram(amount * massOf(parent.fractions, molarMasses)),
       state: state.value,
       rise: state.value.pressure - (before?.pressure ?? 0),
-      strip: strip.value,
+      strip: pressuresAt(model, vessel, held, STRIP_CELSIUS),
       gauge: chooseGauge(job.gauges, parent.gauge, state.value.pressure)?.key ?? null,
       weighing: scale(massOf(held, molarMasses), state.value, steps.at(-1)?.weighing ?? null),
     });
@@ -73,15 +77,13 @@ export function massOf(amounts: Float64Array, molarMasses: Float64Array): number
   return amounts.reduce((sum, amount, i) => sum + amount * molarMasses[i]!, 0);
 }
 
-function temperatureStrip(model: ThermoModel, vessel: Vessel, amounts: Float64Array): Outcome<StripPoint[], ThermoReason> {
-  const strip: StripPoint[] = [];
-  for (const celsius of STRIP_CELSIUS) {
-    const temperature = kelvin(273.15 + celsius);
+/** Pressures of closed contents at other temperatures, °C; those at which the model has none are left out. */
+export function pressuresAt(model: ThermoModel, vessel: Vessel, amounts: Float64Array, temperatures: readonly number[]): StripPoint[] {
+  return temperatures.flatMap((celsius) => {
+    const temperature = fromCelsius(celsius);
     const state = settle(model, vessel, amounts, temperature);
-    if (!state.ok) return state;
-    strip.push({ temperature, pressure: state.value.pressure });
-  }
-  return ok(strip);
+    return state.ok ? [{ temperature, pressure: state.value.pressure }] : [];
+  });
 }
 
 /**

@@ -1,14 +1,12 @@
-import {
-  cubicMetre, kelvin, kilogram, kilogramPerCubicMetre, kilogramPerMole, ok,
-} from '../../units/index.ts';
-import type { Kelvin, Outcome, Pascal } from '../../units/index.ts';
-import { phaseHint } from '../../thermo/index.ts';
-import type { ModelSource, ThermoModel, ThermoReason } from '../../thermo/index.ts';
+import { cubicMetre, kilogram, kilogramPerCubicMetre, kilogramPerMole } from '../../units/index.ts';
+import type { Kelvin, Pascal } from '../../units/index.ts';
+import { phaseOf } from '../../thermo/index.ts';
+import type { ModelSource, ThermoModel } from '../../thermo/index.ts';
 import type { Job } from '../recipe/job.ts';
-import { settle } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
-import { massOf } from './fill-states.ts';
-import type { CylinderState, FinalQuantities, PlannedComponent, StripPoint } from './plan.ts';
+import { unitDensity } from '../steps/unit-density.ts';
+import { massOf, pressuresAt } from './fill-states.ts';
+import type { CylinderState, FinalQuantities, PlannedComponent } from './plan.ts';
 
 /** Temperatures at which regulations and standards look at a filled cylinder, °C. */
 export const DEVELOPED_CELSIUS: readonly number[] = [15, 20, 21.1, 55, 65];
@@ -33,27 +31,20 @@ const REPORTED_ABOVE = 1e-15;
 export function finalQuantities(
   job: Job, model: ThermoModel, models: ModelSource, vessel: Vessel, finished: CylinderState,
   molarMasses: Float64Array, byIdealStops: Float64Array | null,
-): Outcome<FinalQuantities, ThermoReason> {
-  const developed: StripPoint[] = [];
-  for (const celsius of DEVELOPED_CELSIUS) {
-    const temperature = kelvin(273.15 + celsius);
-    const state = settle(model, vessel, finished.amounts, temperature);
-    if (!state.ok) return state;
-    developed.push({ temperature, pressure: state.value.pressure });
-  }
+): FinalQuantities {
   const meanMolarMass = massOf(finished.fractions, molarMasses);
   const totalMass = meanMolarMass * finished.total;
   const { roomTemperature, barometer } = job.conditions;
-  return ok({
+  return {
     components: components(job, model, models, finished, molarMasses, byIdealStops),
     meanMolarMass: kilogramPerMole(meanMolarMass),
     totalMass: kilogram(totalMass),
     fillingRatio: totalMass / (WATER_DENSITY_15C * job.cylinder.waterCapacity),
     massDensity: kilogramPerCubicMetre(meanMolarMass * finished.density),
-    developedPressures: developed,
+    developedPressures: pressuresAt(model, vessel, finished.amounts, DEVELOPED_CELSIUS),
     // At barometric pressure every gas here is within a few tenths of a percent of ideal: ample for a room estimate.
     releasedVolume: cubicMetre((finished.total * model.gasConstant * roomTemperature) / barometer),
-  });
+  };
 }
 
 function components(
@@ -106,7 +97,8 @@ function pureVolumes(
 
 /** Amount density where the state is known to be gas, mol/m³; null elsewhere. */
 function gasDensity(model: ThermoModel, temperature: Kelvin, pressure: Pascal, x: ArrayLike<number>): number | null {
-  if (phaseHint(model, temperature, pressure, x) === 'not tested') return null;
-  const density = model.density(temperature, pressure, x);
-  return density.ok ? density.value.density : null;
+  const phase = phaseOf(model, temperature, pressure, x);
+  if (phase !== 'gas' && phase !== 'supercritical') return null;
+  const density = unitDensity(model, temperature, pressure, Float64Array.from(x));
+  return density.ok ? density.value : null;
 }

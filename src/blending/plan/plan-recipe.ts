@@ -1,7 +1,7 @@
 import { fail, ok, pascal } from '../../units/index.ts';
 import type { Kelvin, Outcome, Pascal } from '../../units/index.ts';
-import { gasRecord, idealModel, realModel } from '../../thermo/index.ts';
-import type { ModelSource, ThermoModel, ThermoReason } from '../../thermo/index.ts';
+import { boundDioxide, gasRecord, idealModel, realModel } from '../../thermo/index.ts';
+import type { GasId, ModelSource, ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { Recipe } from '../recipe/document.ts';
 import type { Job } from '../recipe/job.ts';
 import { normaliseRecipe } from '../recipe/normalise.ts';
@@ -9,14 +9,16 @@ import type { NearestComposition, RecipeProblem } from '../recipe/problem.ts';
 import { judgePlan } from '../hazards/judge-plan.ts';
 import type { HazardTools } from '../hazards/rule.ts';
 import { mixingOfFill } from '../mixing/mixing.ts';
+import { firstToCondense } from '../phase/liquefied.ts';
+import { phaseOfPlan } from '../phase/plan-phase.ts';
 import { settle } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
-import { solveAmounts } from './amounts.ts';
+import { orderedFractions, solveAmounts } from './amounts.ts';
 import type { AmountProblem, NearestBlend } from './amounts.ts';
 import { fillStates } from './fill-states.ts';
 import { finalQuantities } from './final.ts';
 import { compareWithIdealGas } from './ideal-comparison.ts';
-import type { Plan, UncheckedPlan } from './plan.ts';
+import type { CylinderState, Plan, UncheckedPlan } from './plan.ts';
 import { sequenceOfAdditions } from './sequence.ts';
 
 /** A plan, or everything that stands in its way. */
@@ -33,7 +35,7 @@ export interface PlanOptions {
  *
  *     texts ─ normalise ─▶ Job ─ solveAmounts ─▶ mol of each parent
  *       ─ sequence ─▶ order ─ fillStates ─▶ stops, strips, masses
- *       ─ compareWithIdealGas, finalQuantities, mixingOfFill ─▶ Plan
+ *       ─ compareWithIdealGas, finalQuantities, phaseOfPlan, mixingOfFill ─▶ Plan
  *       ─ judgePlan ─▶ findings
  */
 export function planRecipe(recipe: Recipe, options: PlanOptions = {}): PlanAnswer {
@@ -59,8 +61,9 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
   const molarMasses = Float64Array.from(job.gases, (gas) => gasRecord(gas).molarMass.value);
   const states = fillStates(job, model, vessel, amounts.value, order, molarMasses);
   if (!states.ok) {
-    const { step, reason } = states.reason;
-    return notPlanned([{ code: 'no-state', field: 'route', where: step === 0 ? 'residual' : `step ${String(step)}`, reason }]);
+    const { step, reason, amounts: held, temperature } = states.reason;
+    const where = step === 0 ? 'residual' : `step ${String(step)}`;
+    return notPlanned([{ code: 'no-state', field: 'route', where, reason, condenses: condensing(job, reason, held, temperature) }]);
   }
   const finished = settle(model, vessel, amounts.value.finished, job.order.fillTemperature);
   if (!finished.ok) return notPlanned([{ code: 'no-state', field: 'order', where: 'finished gas', reason: finished.reason }]);
@@ -69,8 +72,8 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
   const final = finalQuantities(
     job, model, models, vessel, finished.value, molarMasses, comparison.ok ? comparison.value.fractions : null,
   );
-  if (!final.ok) return notPlanned([{ code: 'no-state', field: 'order', where: 'finished gas', reason: final.reason }]);
-  const backing = model.modelClass(finished.value.fractions);
+  const trust = model.trust(finished.value.density, finished.value.fractions);
+  if (!trust.ok) return notPlanned([{ code: 'no-state', field: 'order', where: 'finished gas', reason: trust.reason }]);
   const unchecked: UncheckedPlan = {
     job,
     start: states.value.start,
@@ -79,9 +82,13 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
       idealStop: comparison.ok ? comparison.value.stops[index]! : null,
     })),
     finished: finished.value,
-    final: final.value,
-    modelClass: backing.class,
-    estimatedPairs: backing.estimatedPairs,
+    final,
+    phase: phaseOfPlan(job, model, vessel, states.value.start, states.value.steps, finished.value),
+    modelClass: trust.value.class,
+    estimatedPairs: trust.value.estimatedPairs,
+    cubicGases: trust.value.cubicGases,
+    modelUncertainty: trust.value.relativeStandardUncertainty,
+    pairedNitrogenDioxide: pairedNitrogenDioxide(job, finished.value),
     gasConstant: model.gasConstant,
   };
   return ok({
@@ -89,6 +96,11 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
     mixing: mixingOfFill(job, model, amounts.value, finished.value),
     findings: judgePlan(unchecked, judgingTools(model, vessel, unchecked)),
   });
+}
+
+function pairedNitrogenDioxide(job: Job, { amounts, temperature, volume }: CylinderState): number | null {
+  const units = (amounts[job.gases.indexOf('nitrogen dioxide')] ?? 0) / volume;
+  return units > 0 ? 2 * boundDioxide(units, temperature) / units : null;
 }
 
 /** What hazard rules ask of the closed cylinder beyond the plan itself. */
@@ -111,7 +123,15 @@ function amountProblem(job: Job, problem: AmountProblem): RecipeProblem {
   const { barometer } = job.conditions;
   switch (problem.code) {
     case 'state':
-      return { code: 'no-state', field: problem.where === 'residual' ? 'cylinder.contents' : 'order', where: problem.where, reason: problem.reason };
+      return problem.where === 'residual'
+        ? {
+          code: 'no-state', field: 'cylinder.contents', where: problem.where, reason: problem.reason,
+          condenses: condensing(job, problem.reason, job.cylinder.contents.fractions, job.cylinder.contents.temperature),
+        }
+        : {
+          code: 'no-state', field: 'order', where: problem.where, reason: problem.reason,
+          condenses: condensing(job, problem.reason, orderedFractions(job), job.order.fillTemperature),
+        };
     case 'fill-pressure-too-low':
       return { code: problem.code, field: 'order.fillPressure', residualPressure: pascal(problem.residualPressure), barometer };
     case 'residual-in-the-way':
@@ -122,6 +142,11 @@ function amountProblem(job: Job, problem: AmountProblem): RecipeProblem {
         nearest: nearestComposition(job, problem.nearest),
       };
   }
+}
+
+/** The gas to blame where the model finds no gas state; null for other reasons. */
+function condensing(job: Job, { code }: ThermoReason, amounts: Float64Array, temperature: Kelvin): GasId | null {
+  return code === 'no-gas-root' || code === 'equation-breaks-down' ? firstToCondense(job.gases, amounts, temperature) : null;
 }
 
 function nearestComposition(job: Job, nearest: NearestBlend): NearestComposition {

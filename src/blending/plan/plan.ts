@@ -5,6 +5,7 @@ import type { GasId, ModelClass, RangeVerdict } from '../../thermo/index.ts';
 import type { Finding } from '../hazards/finding.ts';
 import type { Job } from '../recipe/job.ts';
 import type { MixingResult } from '../mixing/mixing.ts';
+import type { PlanPhase } from '../phase/plan-phase.ts';
 
 /** One homogeneous state of the cylinder: what is in it and what the gauge will say. */
 export interface CylinderState {
@@ -40,6 +41,7 @@ export interface PlanStep {
   readonly state: CylinderState;
   /** Pressure rise over the state before, each at its own reading, Pa. */
   readonly rise: number;
+  /** At the temperatures of the fill sheet; one at which the gas would condense is left out. */
   readonly strip: readonly StripPoint[];
   /** Key of the gauge this stop is read on; null: no gauge's scale holds it. */
   readonly gauge: string | null;
@@ -83,7 +85,7 @@ export interface FinalQuantities {
   /** kg of gas per kg of water the cylinder holds at 15 °C. */
   readonly fillingRatio: number;
   readonly massDensity: KilogramPerCubicMetre;
-  /** Absolute pressures of the closed cylinder at 15, 20, 21.1, 55 and 65 °C. */
+  /** Absolute pressures of the closed cylinder at 15, 20, 21.1, 55 and 65 °C, as far as the model has them. */
   readonly developedPressures: readonly StripPoint[];
   /** Gas volume when let out to barometric pressure and room temperature. */
   readonly releasedVolume: CubicMetre;
@@ -98,8 +100,15 @@ export interface UncheckedPlan {
   /** The finished gas at the fill temperature. */
   readonly finished: CylinderState;
   readonly final: FinalQuantities;
+  readonly phase: PlanPhase;
   readonly modelClass: ModelClass;
   readonly estimatedPairs: readonly (readonly [GasId, GasId])[];
+  /** Gases of the finished gas that have only a cubic equation. */
+  readonly cubicGases: readonly GasId[];
+  /** Relative standard uncertainty of the model: of a pressure at given amounts, or of amounts at a given pressure. */
+  readonly modelUncertainty: number;
+  /** Part of the NO₂ units that is paired up as N₂O₄ in the finished gas; null without nitrogen dioxide. */
+  readonly pairedNitrogenDioxide: number | null;
   readonly gasConstant: number;
 }
 

@@ -33,5 +33,5 @@ export type RecipeProblem =
   | { readonly code: 'cannot-be-made'; readonly field: FieldPath; readonly gases: readonly GasId[]; readonly nearest: NearestComposition }
   | { readonly code: 'residual-in-the-way'; readonly field: FieldPath; readonly gases: readonly GasId[]; readonly ventTo: Pascal | null; readonly barometer: Pascal }
   | { readonly code: 'fill-pressure-too-low'; readonly field: FieldPath; readonly residualPressure: Pascal; readonly barometer: Pascal }
-  /** The model has no answer; `where` is `residual`, `finished gas` or `step N`. */
-  | { readonly code: 'no-state'; readonly field: FieldPath; readonly where: string; readonly reason: ThermoReason };
+  /** The model has no answer; `where` is `residual`, `finished gas` or `step N`. `condenses`: the gas that condenses first, where one does. */
+  | { readonly code: 'no-state'; readonly field: FieldPath; readonly where: string; readonly reason: ThermoReason; readonly condenses?: GasId | null };

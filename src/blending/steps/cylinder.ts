@@ -1,5 +1,5 @@
 import { cubicMetre, fail, mole, molePerCubicMetre, ok, pascal } from '../../units/index.ts';
-import type { CubicMetre, Kelvin, Outcome, Pascal } from '../../units/index.ts';
+import type { CubicMetre, Kelvin, MolePerCubicMetre, Outcome, Pascal } from '../../units/index.ts';
 import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { JobCylinder } from '../recipe/job.ts';
 import type { CylinderState } from '../plan/plan.ts';
@@ -35,7 +35,8 @@ export function totalAmount(amounts: Float64Array): number {
 /**
  * The pressure of given amounts (mol, aligned with `model.gases`, sum above
  * zero) settled at a temperature, with the cylinder stretched by that same
- * pressure: the secant method on p = p(V(p)).
+ * pressure: the secant method on p = p(V(p)). Nitrogen dioxide counts in NO₂
+ * units, in the amounts given as in the state that comes out.
  */
 export function settle(
   model: ThermoModel, vessel: Vessel, amounts: Float64Array, temperature: Kelvin,
@@ -49,7 +50,7 @@ export function settle(
   for (let step = 1; step <= MAXIMUM_STEPS; step++) {
     const volume = cylinderVolume(vessel, guess, temperature);
     const density = molePerCubicMetre(total / volume);
-    const answer = model.pressure(temperature, density, fractions);
+    const answer = pressureOf(model, temperature, volume, amounts, density, fractions);
     if (!answer.ok) return answer;
     const pressure = answer.value;
     if (!(pressure > 0)) return fail({ code: 'equation-breaks-down', temperature, density });
@@ -68,6 +69,16 @@ export function settle(
     guess = next > 0 && next < Infinity ? pascal(next) : pressure;
   }
   return fail({ code: 'not-converged', iterations: MAXIMUM_STEPS, residual: change });
+}
+
+/** Pressure of amounts in a volume; fractions and density are theirs and serve as they are where nothing pairs up. */
+function pressureOf(
+  model: ThermoModel, temperature: Kelvin, volume: CubicMetre, amounts: Float64Array, density: MolePerCubicMetre, fractions: Float64Array,
+): Outcome<Pascal, ThermoReason> {
+  const molecules = model.molecules(amounts, temperature, volume);
+  if (molecules === amounts) return model.pressure(temperature, density, fractions);
+  const total = totalAmount(molecules);
+  return model.pressure(temperature, molePerCubicMetre(total / volume), molecules.map((amount) => amount / total));
 }
 
 /**

@@ -3,7 +3,8 @@ import { kelvin, pascal } from '../../../src/units/index.ts';
 import { boundaryReach, classifyTogether } from '../../../src/blending/hazards/fuel-and-oxidiser.ts';
 import { cautiousLimitingOxygen, flammableRow } from '../../../src/blending/hazards/data/flammable-gases.ts';
 import { adiabaticTemperature } from '../../../src/blending/hazards/oxygen-heat.ts';
-import { condensationLimit, icePressure } from '../../../src/blending/hazards/condensation-limit.ts';
+import { icePressure } from '../../../src/thermo/index.ts';
+import { condensationLimit } from '../../../src/blending/hazards/condensation-limit.ts';
 import { roomOxygen } from '../../../src/blending/hazards/room-air.ts';
 import { mixtureLc50 } from '../../../src/blending/hazards/toxicity.ts';
 
@@ -30,7 +31,7 @@ describe('condensation limit', () => {
     const dry = condensationLimit(gases, Float64Array.of(0.1, 0, 0.9), kelvin(263.15));
     const damp = condensationLimit(gases, Float64Array.of(0.1, 1e-5, 0.9 - 1e-5), kelvin(263.15));
     if (!dry.ok || !damp.ok) throw new Error('no limit');
-    expect(1 / damp.value).toBeCloseTo(1 / dry.value + 1e-5 / icePressure(kelvin(263.15)), 12);
+    expect(1 / damp.value.limit).toBeCloseTo(1 / dry.value.limit + 1e-5 / icePressure(kelvin(263.15)), 12);
   });
 });
 

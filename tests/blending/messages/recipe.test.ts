@@ -13,7 +13,7 @@ const nearest = { components: [
 
 /** One reason of every code; a new code without an example does not compile. */
 const thermoReasons: { readonly [Code in ThermoReason['code']]: Extract<ThermoReason, { code: Code }> } = {
-  'unknown-gas': { code: 'unknown-gas', gas: 'xenon' },
+  'unknown-gas': { code: 'unknown-gas', gas: 'phlogiston' },
   'no-gases': { code: 'no-gases' },
   'duplicate-gas': { code: 'duplicate-gas', gas: 'argon' },
   'composition-length': { code: 'composition-length', expected: 2, given: 3 },
@@ -25,12 +25,14 @@ const thermoReasons: { readonly [Code in ThermoReason['code']]: Extract<ThermoRe
   'no-gas-root': { code: 'no-gas-root', temperature: 293.15, pressure: 60e5 },
   'no-liquid-root': { code: 'no-liquid-root', temperature: 293.15, pressure: 60e5 },
   'not-converged': { code: 'not-converged', iterations: 60, residual: 1e-3 },
+  'equations-not-loaded': { code: 'equations-not-loaded', gases: ['neon', 'ethylene'] },
+  'not-compared': { code: 'not-compared' },
   'equation-breaks-down': { code: 'equation-breaks-down', temperature: 293.15, density: 3e4 },
 };
 
 const problems: { readonly [Code in RecipeProblem['code']]: Extract<RecipeProblem, { code: Code }> } = {
   'entry': { code: 'entry', field, problem: { code: 'not-a-number', text: 'much' } },
-  'gas-unknown': { code: 'gas-unknown', field, text: 'xenon' },
+  'gas-unknown': { code: 'gas-unknown', field, text: 'phlogiston' },
   'gas-missing': { code: 'gas-missing', field },
   'gas-repeated': { code: 'gas-repeated', field, gas: 'carbon dioxide' },
   'no-components': { code: 'no-components', field },

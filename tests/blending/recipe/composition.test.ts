@@ -39,7 +39,7 @@ describe('readComposition', () => {
     [[['N2', '60 %'], ['O2', '41 %']], 'sum-not-one', 'here'],
     [[['CO2', '60 %'], ['O2', '40 %'], ['N2', 'balance']], 'sum-above-one', 'here'],
     [[['N2', 'balance'], ['n2', '1 %']], 'gas-repeated', 'here.1.gas'],
-    [[['N2', 'balance'], ['xenon', '1 %']], 'gas-unknown', 'here.1.gas'],
+    [[['N2', 'balance'], ['phlogiston', '1 %']], 'gas-unknown', 'here.1.gas'],
     [[['N2', 'balance'], [' ', '1 %']], 'gas-missing', 'here.1.gas'],
     [[['N2', 'balance'], ['O2', '0 %']], 'fraction-zero', 'here.1.amount'],
     [[['N2', 'balance'], ['O2', '1']], 'entry', 'here.1.amount'],

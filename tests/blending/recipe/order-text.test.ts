@@ -38,7 +38,7 @@ describe('readOrderText', () => {
   });
 
   it('keeps a gas it does not know as typed, to be asked about beside its field', () => {
-    expect(pairs('1 % xenon, bal N2')).toEqual(['1 % xenon', 'balance N₂']);
+    expect(pairs('1 % phlogiston, bal N2')).toEqual(['1 % phlogiston', 'balance N₂']);
   });
 
   it('of nothing is nothing', () => {

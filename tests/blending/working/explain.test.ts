@@ -1,7 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import {
-  demoRecipes, explainComponent, explainDeveloped, explainIdealStop, explainMass, explainStop, planRecipe,
-} from '../../../src/blending/index.ts';
+import { demoRecipes, planRecipe } from '../../../src/blending/index.ts';
+import { explainComponent, explainDeveloped, explainIdealStop, explainMass, explainStop } from '../../../src/blending/working/explain.ts';
 import type { Plan, Working } from '../../../src/blending/index.ts';
 import { planned, valueOf } from '../lab.ts';
 

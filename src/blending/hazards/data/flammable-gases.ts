@@ -6,6 +6,9 @@ import type { Trust } from '../finding.ts';
  *
  * Lower and upper limits: the lowest and the highest of IEC 60079-20-1:2010 and
  * NFPA 497 (2008), because the two lists differ (methane 4.4 and 5.0 %).
+ * Not in those lists: deuterium takes the limits of hydrogen; phosphine and arsine
+ * the NIOSH lower limit, phosphine without an upper one known; silane, which may
+ * light by itself, counts as flammable from 0.5 % (1.37 % from memory is not used).
  * Tci: ISO 10156:2017. The figures marked `seen` were read, or are the ones that
  * reproduce the published examples of the standard (tests/blending/hazards/
  * iso10156.test.ts); the others are from memory.
@@ -45,6 +48,29 @@ const rows: readonly Row[] = [
   ['n-nonane', 0.7, 5.6, null, null],
   ['n-decane', 0.7, 5.6, null, null],
   ['hydrogen sulfide', 4.0, 45.5, null, [7.5, 'tube']],
+  ['ethylene', 2.3, 36, [4.1, 'from memory'], [8.5, 'vessel']],
+  ['acetylene', 2.3, 100, [3, 'from memory'], null],
+  ['propylene', 2, 11.1, [4.2, 'from memory'], [11.5, 'tube']],
+  ['isobutene', 1.6, 10, null, [12, 'tube']],
+  ['1-butene', 1.6, 10, null, [11.5, 'tube']],
+  ['1,3-butadiene', 1.4, 16.3, [4.5, 'from memory'], [10.5, 'tube']],
+  ['neopentane', 1.4, 8.3, null, null],
+  ['benzene', 1.2, 8.6, null, [11.4, 'tube']],
+  ['toluene', 1, 7.8, null, [9.5, 'tube']],
+  ['carbonyl sulfide', 6.5, 28.5, null, null],
+  ['methyl mercaptan', 3.9, 21.8, null, null],
+  ['ammonia', 15, 33.6, [40.1, 'from memory'], null],
+  ['hydrogen cyanide', 5.4, 46, null, null],
+  ['ethylene oxide', 2.6, 100, [4.8, 'from memory'], null],
+  ['methanol', 6, 36, null, [10, 'tube']],
+  ['ethanol', 3.1, 19, null, [10.5, 'tube']],
+  ['acetone', 2.5, 14.3, null, [11.5, 'tube']],
+  ['formaldehyde', 7, 73, null, null],
+  ['vinyl chloride', 3.6, 33, null, null],
+  ['deuterium', 4, 77, null, null],
+  ['phosphine', 1.79, 100, null, null],
+  ['arsine', 5.1, 78, null, null],
+  ['silane', 0.5, 100, null, null],
 ];
 
 const byGas: ReadonlyMap<string, FlammableRow> = new Map(

@@ -16,7 +16,14 @@ const rows: readonly InertRow[] = [
   { gas: 'neon', listed: 0.7 },
   { gas: 'krypton', listed: 0.5 },
   { gas: 'xenon', listed: 0.5 },
+  { gas: 'sulfur dioxide', listed: 1.5 },
+  { gas: 'sulfur hexafluoride', listed: 4 },
+  { gas: 'tetrafluoromethane', listed: 2 },
   { gas: 'water', listed: null },
+  { gas: 'hydrogen chloride', listed: null },
+  { gas: 'hydrogen fluoride', listed: null },
+  { gas: 'r134a', listed: null },
+  { gas: 'trifluoromethane', listed: null },
 ];
 
 /** Note of Table 1: other non-flammable gases of three or more atoms. */

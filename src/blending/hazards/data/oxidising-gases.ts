@@ -14,6 +14,9 @@ export interface OxidiserRow {
 const rows: readonly OxidiserRow[] = [
   { gas: 'oxygen', coefficient: 1, trust: 'seen' },
   { gas: 'nitrous oxide', coefficient: 0.6, trust: 'seen' },
+  { gas: 'nitric oxide', coefficient: 0.3, trust: 'from memory' },
+  { gas: 'nitrogen dioxide', coefficient: 1, trust: 'from memory' },
+  { gas: 'chlorine', coefficient: 0.7, trust: 'from memory' },
 ];
 
 const byGas: ReadonlyMap<string, OxidiserRow> = new Map(rows.map((row) => [row.gas, row]));

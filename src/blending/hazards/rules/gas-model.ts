@@ -1,3 +1,4 @@
+import { formatNumber } from '../../../units/index.ts';
 import type { RangeVerdict } from '../../../thermo/index.ts';
 import { compositionWords as words } from '../../messages/hazards.ts';
 import type { UncheckedPlan } from '../../plan/plan.ts';
@@ -21,6 +22,22 @@ const pairsCard: RuleCard = {
   trust: 'seen',
 };
 
+const cubicCard: RuleCard = {
+  id: 'cubic-gas',
+  title: 'Gases with a cubic equation only',
+  source: 'Peng and Robinson, Ind. Eng. Chem. Fundam. 15 (1976) 59',
+  edition: '1976',
+  trust: 'seen',
+};
+
+const pairingCard: RuleCard = {
+  id: 'nitrogen-dioxide-pairs',
+  title: 'Nitrogen dioxide pairs up under pressure',
+  source: 'NIST-JANAF Thermochemical Tables: 2 NO₂ ⇌ N₂O₄',
+  edition: '4th edition, 1998',
+  trust: 'computed',
+};
+
 /** Content of both gases above which an estimated pair is worth a caution (own choice). */
 const matters = 0.01;
 /** Content of either gas up to which a pair cannot move a stop (own choice). */
@@ -33,6 +50,31 @@ export const modelRange: HazardRule = { ...rangeCard, judge: judgeRange };
 
 /** Pairs that are present and were estimated rather than fitted. */
 export const estimatedPairs: HazardRule = { ...pairsCard, judge: judgePairs };
+
+/** Gases whose own equation is the weak part of the model. */
+export const cubicGas: HazardRule = { ...cubicCard, judge: judgeCubic };
+
+/** How much of the nitrogen dioxide is dinitrogen tetroxide in the finished cylinder. */
+export const nitrogenDioxidePairs: HazardRule = { ...pairingCard, judge: judgePairing };
+
+function judgeCubic({ plan }: HazardContext): readonly Finding[] {
+  const content = (gas: string): number => plan.finished.fractions[(plan.job.gases as readonly string[]).indexOf(gas)] ?? 0;
+  if (plan.cubicGases.length === 0) return [];
+  const important = plan.cubicGases.some((gas) => content(gas) > matters);
+  return [finding(cubicCard, {
+    verdict: important ? 'caution' : 'note',
+    place: { kind: 'finished gas' },
+    words: words.cubicGas(plan.cubicGases.join(', '), important),
+    figure: `${formatNumber(plan.modelUncertainty * 100, 2)} % of pressure, standard uncertainty of the model`,
+    limit: 'a reference equation',
+  })];
+}
+
+function judgePairing({ plan }: HazardContext): readonly Finding[] {
+  if (plan.pairedNitrogenDioxide === null) return [];
+  const figure = `${formatNumber(plan.pairedNitrogenDioxide * 100, 1)} % of the NO₂ units`;
+  return [finding(pairingCard, { verdict: 'note', place: { kind: 'finished gas' }, words: words.nitrogenDioxidePairs(figure), figure, limit: 'none' })];
+}
 
 function judgeRange({ plan }: HazardContext): readonly Finding[] {
   const states: { place: FindingPlace; where: string; range: RangeVerdict }[] = [];

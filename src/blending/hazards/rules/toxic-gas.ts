@@ -1,6 +1,6 @@
 import { formatNumber } from '../../../units/index.ts';
 import { classWords as words } from '../../messages/hazards.ts';
-import { toxicRow } from '../data/toxic-gases.ts';
+import { lacksLc50, toxicRow } from '../data/toxic-gases.ts';
 import type { Finding } from '../finding.ts';
 import { finding } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
@@ -23,7 +23,28 @@ const highlyToxicUpTo = 200;
 /** Names toxic gases with their LC50 and that of the mixture. */
 export const toxicGas: HazardRule = { ...card, judge };
 
-function judge({ plan }: HazardContext): readonly Finding[] {
+function judge(context: HazardContext): readonly Finding[] {
+  return [...judgeTable(context), ...judgeUnknown(context)];
+}
+
+/** Gases known to be harmful for which there is no figure: what cannot be judged counts against the plan. */
+function judgeUnknown({ plan }: HazardContext): readonly Finding[] {
+  const present = plan.job.gases.flatMap((gas, i) => {
+    const content = plan.finished.fractions[i] ?? 0;
+    return lacksLc50(gas) && content > trace ? [`${gas} ${showFraction(content)}`] : [];
+  });
+  if (present.length === 0) return [];
+  return [finding(card, {
+    verdict: 'caution',
+    place: { kind: 'finished gas' },
+    about: 'unknown',
+    words: words.toxicUnknown(present.join(', ')),
+    figure: 'LC50 not known here',
+    limit: `${toxicUpTo} µmol/mol`,
+  })];
+}
+
+function judgeTable({ plan }: HazardContext): readonly Finding[] {
   const { gases } = plan.job;
   const x = plan.finished.fractions;
   const mixture = mixtureLc50(gases, x);

@@ -73,6 +73,12 @@ export const toxicMixture = (names: string, mixture: string, gases: string, word
   remedy: 'Fill under extraction with a gas detector for each component; class, valve and packaging follow the mixture LC50.',
 });
 
+export const toxicUnknown = (names: string): Words => ({
+  title: `Harmful component without an LC50 here: ${names}`,
+  detail: 'It is poisonous, or harms over time, and this program has no LC50 for it: the LC50 of the finished gas, where one is given, leaves it out.',
+  remedy: 'Take class, limits and precautions from its safety data sheet; fill under extraction.',
+});
+
 export const toxicTrace = (mixture: string, gases: string): Words => ({
   title: 'Trace of a toxic gas',
   detail: `${gases}. Finished gas: ${mixture}, from memory.`,

@@ -28,6 +28,20 @@ export const estimatedPairs = (pairs: string, matters: boolean): Words => ({
   remedy: matters ? 'Weigh these additions if you can, and verify the finished gas by analysis.' : '',
 });
 
+export const cubicGas = (gases: string, matters: boolean): Words => ({
+  title: `Cubic equation for ${gases}`,
+  detail: matters
+    ? 'No reference equation of these gases is at hand, and one is above 1 %: the stops may be off by more than usual.'
+    : 'No reference equation of these gases is at hand; each is below 1 %, so little depends on it.',
+  remedy: matters ? 'Weigh these additions if you can, and verify the finished gas by analysis.' : '',
+});
+
+export const nitrogenDioxidePairs = (figure: string): Words => ({
+  title: `Nitrogen dioxide: ${figure} paired as N₂O₄ in the full cylinder`,
+  detail: 'Contents are counted in NO₂ units; every pair is one molecule less, which the stops take into account. At the pressure of use the pairs come apart again.',
+  remedy: '',
+});
+
 export const unorderedGas = (gas: string, figure: string): Words => ({
   title: `Not ordered: ${gas} ${figure}`,
   detail: 'It comes from the residual gas or from an impurity of a parent.',

@@ -67,3 +67,32 @@ export const supplyNotStated = (name: string, stop: string): Words => ({
   detail: `Whether it reaches its stop of ${stop} cannot be judged; if it does not, the mixture flows back into the parent.`,
   remedy: 'Enter the supply pressure of this parent.',
 });
+
+/** What the sentences about a liquefied parent need; pressures as shown. */
+export interface LiquefiedSupply {
+  readonly name: string;
+  /** Its vapour pressure at room temperature. */
+  readonly figure: string;
+  readonly stop: string;
+  readonly step: number;
+  /** Room temperature. */
+  readonly at: string;
+}
+
+export const liquefiedTooLow = ({ name, figure, stop, step, at }: LiquefiedSupply): Words => ({
+  title: `${name} gives ${figure} as vapour, below the stop of step ${step}`,
+  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure} however full the cylinder is, and cannot push higher; the stop is ${stop}. A higher cylinder pressure would push the mixture back into it.`,
+  remedy: 'Add it earlier, at a lower total pressure, from a gaseous premix, or with a pump made for liquefied gas.',
+});
+
+export const liquefiedMargin = ({ name, figure, stop, step, at }: LiquefiedSupply): Words => ({
+  title: `${name} gives ${figure} as vapour, close to the stop of step ${step}`,
+  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure}, and lower once the cylinder cools as it is drawn; the stop is ${stop}. Filling slows towards the end.`,
+  remedy: 'Draw slowly and let the parent warm up, or add it at a lower total pressure.',
+});
+
+export const liquefiedNotStated = ({ name, figure, stop, at }: LiquefiedSupply): Words => ({
+  title: `Supply pressure of ${name} not stated`,
+  detail: `While it holds liquid its vapour stands at ${figure} at ${at}, above the stop of ${stop}; once the liquid is gone it falls.`,
+  remedy: 'Enter the supply pressure of this parent, or weigh it.',
+});

@@ -61,6 +61,30 @@ describe('model-range', () => {
   });
 });
 
+describe('cubic-gas', () => {
+  const rule = 'cubic-gas';
+  const withNitricOxide = (bar: number): UncheckedPlan => planFixture({
+    parents: { ...parents, oxide: { mix: { 'nitric oxide': 1 } } }, additions: [['oxygen', 100 - bar], ['oxide', bar]],
+    plan: { modelClass: 'cubic', cubicGases: ['nitric oxide'], modelUncertainty: 1.2e-3 },
+  });
+
+  it('cautions above 1 %, notes below, with the uncertainty', () => {
+    expect(findingsOf(rule, withNitricOxide(1.1))).toMatchObject([{ verdict: 'caution', title: 'Cubic equation for nitric oxide' }]);
+    expect(findingsOf(rule, withNitricOxide(0.9))).toMatchObject([{ verdict: 'note' }]);
+    expect(findingsOf(rule, withNitricOxide(0.9))[0]!.figure).toContain('0.12 %');
+    expect(findingsOf(rule, plain)).toEqual([]);
+  });
+});
+
+describe('nitrogen-dioxide-pairs', () => {
+  const rule = 'nitrogen-dioxide-pairs';
+
+  it('says how much is paired, and nothing where there is none', () => {
+    expect(findingsOf(rule, { ...plain, pairedNitrogenDioxide: 0.433 })[0]!.title).toContain('43.3 % of the NO₂ units');
+    expect(findingsOf(rule, plain)).toEqual([]);
+  });
+});
+
 describe('estimated-pairs', () => {
   const rule = 'estimated-pairs';
   const estimated = (oxygen: number): UncheckedPlan => planFixture({

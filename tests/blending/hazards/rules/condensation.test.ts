@@ -2,12 +2,80 @@ import { describe, expect, it } from 'vitest';
 import { fail, ok } from '../../../../src/units/index.ts';
 import { findingsOf, verdictsOf } from '../../../fixtures/judge.ts';
 import { bar, celsius, planFixture } from '../../../fixtures/unchecked-plan.ts';
+import type { LargestFill } from '../../../../src/blending/phase/largest-fill.ts';
+import type { ColdestPhase, StatePhase } from '../../../../src/blending/phase/plan-phase.ts';
 import type { UncheckedPlan } from '../../../../src/blending/plan/plan.ts';
 
 const parents = { nitrogen: { mix: { nitrogen: 1 } }, butane: { mix: { 'n-butane': 1 } }, carbon: { mix: { 'carbon dioxide': 1 } } } as const;
 const butane = (total: number, coldest: number | null = 0): UncheckedPlan => planFixture({
   parents, additions: [['butane', total / 100], ['nitrogen', 0.99 * total]],
   conditions: { coldestStorage: coldest === null ? null : celsius(coldest) },
+});
+
+/** The phase part of a plan whose stability was tested and whose largest fill is known (bar absolute; null: no dew point). */
+function tested(plan: UncheckedPlan, largest: number | null, more: Partial<ColdestPhase & LargestFill> & { readonly code?: string } = {}): UncheckedPlan {
+  const limit: LargestFill | null = largest === null ? null : {
+    pressure: bar(largest), dewPressure: bar(largest), forming: { gas: 'n-butane', ice: false }, mayFreeze: more.mayFreeze ?? false,
+  };
+  return {
+    ...plan,
+    phase: {
+      start: null, steps: plan.steps.map(() => ({ phase: 'gas' })), finished: { phase: 'gas' }, guessedPairs: [],
+      coldest: {
+        temperature: plan.job.conditions.coldestStorage!, searchedTo: bar(300), slightlyColder: more.slightlyColder ?? { phase: 'gas' },
+        largestFill: more.code === undefined ? ok(limit) : fail({ code: more.code }),
+      },
+    },
+  };
+}
+
+/** The same plan where nobody measured butane with nitrogen. */
+function guessed(plan: UncheckedPlan): UncheckedPlan {
+  return { ...plan, phase: { ...plan.phase, guessedPairs: [['nitrogen', 'n-butane']] } };
+}
+
+describe('condensation-in-storage by the dew point', () => {
+  const rule = 'condensation-in-storage';
+  const of = (plan: UncheckedPlan): unknown => findingsOf(rule, plan);
+
+  it('holds above the largest fill, cautions from 70 % of it (common practice), notes below', () => {
+    expect(of(tested(butane(60), 59))).toMatchObject([{ verdict: 'hold', figure: '59.0 bar gauge', limit: '58.0 bar gauge' }]);
+    expect(of(tested(butane(60), 61))).toMatchObject([{ verdict: 'caution' }]);
+    expect(of(tested(butane(60), 60 / 0.69))).toMatchObject([{ verdict: 'note', trust: 'computed' }]);
+  });
+
+  it('shows the vapour pressure rule beside: K2 allows 110.5 bar absolute, 109.5 bar gauge', () => {
+    const [kept] = findingsOf(rule, tested(butane(60), null));
+    expect(kept).toMatchObject({ verdict: 'note' });
+    expect(kept!.detail).toMatch(/allows 109\.\d bar gauge and is kept/u);
+  });
+
+  it('lets a dew point of measured pairs overrule the rule to a caution, not of estimated pairs, nor for moisture', () => {
+    expect(of(tested(butane(111.5), null))).toMatchObject([{ verdict: 'caution' }]);
+    expect(of(guessed(tested(butane(111.5), null)))).toMatchObject([{ verdict: 'hold', trust: 'from memory' }]);
+    const moist = planFixture({ parents: { damp: { mix: { water: 29.2e-6, nitrogen: 1 - 29.2e-6 } } }, additions: [['damp', 100]], conditions: { coldestStorage: celsius(-10) } });
+    expect(of(tested(moist, null))).toMatchObject([{ verdict: 'hold' }]);
+  });
+
+  it('cautions when the gas condenses 5 K below, or may freeze', () => {
+    expect(of(tested(butane(60), null, { slightlyColder: { phase: 'unstable', forming: null } }))).toMatchObject([{ verdict: 'caution' }]);
+    expect(of(tested(butane(60), null, { slightlyColder: { phase: 'not tested', code: 'not-converged' } }))).toMatchObject([{ verdict: 'caution', figure: 'not computed' }]);
+    expect(of(tested(butane(60), 200, { mayFreeze: true }))).toMatchObject([{ verdict: 'caution' }]);
+  });
+
+  it('needs no rule where the dew point is known: carbon dioxide below its triple point', () => {
+    const cold = planFixture({ parents, additions: [['carbon', 1], ['nitrogen', 99]], conditions: { coldestStorage: celsius(-70) } });
+    expect(of(tested(cold, null))).toMatchObject([{ verdict: 'note' }]);
+  });
+
+  it('falls back on the rule where the dew point is not found, and holds what is no gas at all', () => {
+    expect(of(tested(butane(111.5), null, { code: 'not-converged' }))).toMatchObject([{ verdict: 'hold', trust: 'from memory' }]);
+    expect(of(tested(butane(60), null, { code: 'unstable-from-the-start' }))).toMatchObject([{ verdict: 'hold', figure: 'not computed' }]);
+  });
+
+  it('has nothing to say when nothing can condense', () => {
+    expect(of(tested(planFixture({ parents: { nitrogen: parents.nitrogen }, additions: [['nitrogen', 150]] }), null))).toEqual([]);
+  });
 });
 
 describe('condensation-in-storage', () => {
@@ -61,6 +129,34 @@ describe('condensation-in-storage', () => {
 
   it('has nothing to say when nothing can condense', () => {
     expect(findingsOf(rule, planFixture({ parents: { nitrogen: parents.nitrogen }, additions: [['nitrogen', 150]] }))).toEqual([]);
+  });
+});
+
+describe('condensation-at-step by the stability test', () => {
+  const rule = 'condensation-at-step';
+  const separated: StatePhase = { phase: 'unstable', forming: { gas: 'n-butane', ice: false } };
+
+  it('holds the step, the residual or the finished gas that separates, and says what forms', () => {
+    const plan = tested(butane(60), null);
+    const steps = { ...plan, phase: { ...plan.phase, steps: [{ phase: 'gas' } as const, separated], finished: separated } };
+    expect(verdictsOf(rule, steps)).toEqual({ [`${rule}:step-2`]: 'hold' });
+    expect(findingsOf(rule, steps)[0]!.detail).toMatch(/mostly n-butane/iu);
+    expect(verdictsOf(rule, { ...plan, phase: { ...plan.phase, finished: separated } })).toEqual({ [`${rule}:finished-gas`]: 'hold' });
+    const held = planFixture({ parents, additions: [['nitrogen', 50]], start: { mix: { 'n-butane': 1 }, bar: 1 } });
+    expect(verdictsOf(rule, { ...tested(held, null), phase: { ...tested(held, null).phase, start: { phase: 'unstable', forming: null } } }))
+      .toMatchObject({ [`${rule}:cylinder`]: 'hold' });
+  });
+
+  it('cautions where a tested gas breaks the vapour pressure rule, holds where the pair was only estimated', () => {
+    // The last state holds 51 bar of n-butane against 2.08 bar at 20 °C (computed table).
+    const plan = planFixture({ parents, additions: [['butane', 1], ['nitrogen', 50], ['butane', 50]] });
+    expect(verdictsOf(rule, tested(plan, null))).toEqual({ [`${rule}:step-3`]: 'caution' });
+    expect(verdictsOf(rule, guessed(tested(plan, null)))).toEqual({ [`${rule}:step-3`]: 'hold' });
+  });
+
+  it('needs no rule where the test has an answer', () => {
+    const cold = planFixture({ parents, additions: [['carbon', 1], ['nitrogen', 99]], stepCelsius: [-70, 20] });
+    expect(verdictsOf(rule, tested(cold, null))).toEqual({});
   });
 });
 

@@ -88,14 +88,14 @@ describe('balance-too-coarse', () => {
 describe('supply-pressure', () => {
   const rule = 'supply-pressure';
   const supplied = (pressure: number | null): unknown => verdictsOf(rule, planFixture({
-    parents: { carbon: { mix: { 'carbon dioxide': 1 }, pressure }, nitrogen: { mix: { nitrogen: 1 } } },
-    additions: [['nitrogen', 80], ['carbon', 20]],
+    parents: { argon: { mix: { argon: 1 }, pressure }, nitrogen: { mix: { nitrogen: 1 } } },
+    additions: [['nitrogen', 80], ['argon', 20]],
   }));
 
   it('holds a supply below its stop of 100 bar absolute, cautions within 5 %', () => {
-    expect(supplied(99.9)).toEqual({ [`${rule}:parent-carbon`]: 'hold' });
-    expect(supplied(100.1)).toEqual({ [`${rule}:parent-carbon`]: 'caution' });
-    expect(supplied(104.9)).toEqual({ [`${rule}:parent-carbon`]: 'caution' });
+    expect(supplied(99.9)).toEqual({ [`${rule}:parent-argon`]: 'hold' });
+    expect(supplied(100.1)).toEqual({ [`${rule}:parent-argon`]: 'caution' });
+    expect(supplied(104.9)).toEqual({ [`${rule}:parent-argon`]: 'caution' });
     expect(supplied(105.1)).toEqual({});
   });
 
@@ -116,6 +116,29 @@ describe('supply-pressure', () => {
   });
 
   it('counts against the plan when it is not stated', () => {
-    expect(supplied(null)).toEqual({ [`${rule}:parent-carbon`]: 'caution' });
+    expect(supplied(null)).toEqual({ [`${rule}:parent-argon`]: 'caution' });
+  });
+
+  describe('of a liquefied gas', () => {
+    // Computed table: carbon dioxide 57.3 bar, propane 8.37 bar absolute at 20 °C, the room of the fixture.
+    const liquefied = (gas: 'carbon dioxide' | 'propane', pressure: number | null, stop: number): unknown => findingsOf(rule, planFixture({
+      parents: { nitrogen: { mix: { nitrogen: 1 } }, liquid: { mix: { [gas]: 1 }, pressure } }, additions: [['nitrogen', stop - 2], ['liquid', 2]],
+    }));
+
+    it('holds a stop above its vapour pressure, whatever pressure was typed', () => {
+      for (const typed of [8.4, 30, null]) expect(liquefied('propane', typed, 8.5)).toMatchObject([{ verdict: 'hold', figure: '7.36 bar gauge' }]);
+      expect(liquefied('carbon dioxide', 60, 57.5)).toMatchObject([{ verdict: 'hold' }]);
+    });
+
+    it('cautions close below it and when nothing was typed, and is silent with margin enough', () => {
+      expect(liquefied('carbon dioxide', 60, 56)).toMatchObject([{ verdict: 'caution' }]);
+      expect(liquefied('propane', 8.4, 7)).toMatchObject([{ verdict: 'caution' }]);
+      expect(liquefied('propane', null, 5)).toMatchObject([{ verdict: 'caution' }]);
+      expect(liquefied('propane', 8.4, 5)).toEqual([]);
+    });
+
+    it('takes a cylinder that stands clearly below its vapour pressure for one without liquid', () => {
+      expect(liquefied('carbon dioxide', 30, 29)).toMatchObject([{ verdict: 'caution', figure: '29.0 bar gauge' }]);
+    });
   });
 });

@@ -29,6 +29,15 @@ describe(rule, () => {
     expect(findingsOf(rule, planFixture({ parents: { gas: { mix } }, additions: [['gas', 100]], unordered: ['carbon monoxide'] }))).toEqual([]);
   });
 
+  it('counts a harmful gas without an LC50 against the plan', () => {
+    expect(judge({ benzene: 1e-5, nitrogen: 1 - 1e-5 })).toMatchObject([{ verdict: 'caution', figure: 'LC50 not known here' }]);
+    expect(judge({ methanol: 1e-3, ammonia: 0.01, nitrogen: 0.989 })).toMatchObject([{ verdict: 'caution' }, { verdict: 'caution', figure: 'LC50 not known here' }]);
+  });
+
+  it('takes the lowest of figures that disagree: arsine 20, not 178 µmol/mol', () => {
+    expect(judge({ arsine: 1e-4, nitrogen: 0.9999 })).toMatchObject([{ figure: 'LC50 200000 µmol/mol' }]);
+  });
+
   it('has nothing to say of other gases', () => {
     expect(judge({ nitrogen: 1 })).toEqual([]);
   });
