@@ -1,8 +1,9 @@
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
-import { demoRecipes, planRecipe } from './blending/index.ts';
+import { demoRecipes, loadAllGases, planRecipe } from './blending/index.ts';
+import type { ProofRunner } from './blending/index.ts';
 import { createWorkspace, localRecipeStorage } from './state/index.ts';
-import { App, WorkspaceProvider } from './ui/index.ts';
+import { App, printedNow, WorkspaceProvider } from './ui/index.ts';
 
 /* Composition root: the only file that knows every layer. */
 
@@ -31,15 +32,31 @@ const workspace = createWorkspace({
   starters: demoRecipes,
 });
 
+/* The equations outside GERG-2008 come after the page; until then a recipe that needs one says so. */
+void loadAllGases().then(() => { workspace.actions.replan(); });
+
 window.addEventListener('pagehide', () => { workspace.actions.flush(); });
-window.addEventListener('afterprint', () => { workspace.actions.markIssued(); });
+window.addEventListener('afterprint', () => { if (printedNow() === 'sheet') workspace.actions.markIssued(); });
+
+/** The thread for the proof, fetched when somebody starts one. */
+const prover: ProofRunner = {
+  start: (report) => {
+    let stopped = false;
+    let stop = () => { stopped = true; };
+    import('./worker/index.ts').then(
+      ({ proofRunner }) => { if (!stopped) stop = proofRunner().start(report); },
+      (error: unknown) => { report({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }); },
+    );
+    return () => { stop(); };
+  },
+};
 
 const root = document.getElementById('root');
 if (root === null) throw new Error('index.html has no element with the id "root".');
 createRoot(root).render(
   <StrictMode>
     <WorkspaceProvider workspace={workspace}>
-      <App program={program} />
+      <App program={program} prover={prover} />
     </WorkspaceProvider>
   </StrictMode>,
 );

@@ -1,33 +1,40 @@
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
+import type { ProofRunner } from '../blending/index.ts';
 import { useWorkspaceState } from './bindings/workspace.tsx';
 import { ProblemsProvider } from './bindings/problems.tsx';
-import { GasNames } from './parts/GasNames.tsx';
 import { Header } from './Header.tsx';
 import type { View } from './Header.tsx';
 import { NoticeBar } from './NoticeBar.tsx';
 import { OfflineNotice } from './offline/OfflineNotice.tsx';
 import { ChecksPanel } from './tasks/checks/ChecksPanel.tsx';
 import { CylinderSection } from './tasks/cylinder/CylinderSection.tsx';
-import { FinishedView } from './tasks/finished/FinishedView.tsx';
 import { InstrumentsSection } from './tasks/instruments/InstrumentsSection.tsx';
-import { MixingView } from './tasks/mixing/MixingView.tsx';
 import { FillSection } from './tasks/order/FillSection.tsx';
 import { OrderSection } from './tasks/order/OrderSection.tsx';
 import { ParentsSection } from './tasks/parents/ParentsSection.tsx';
 import { PlanView } from './tasks/plan/PlanView.tsx';
-import { RecipesView } from './tasks/recipes/RecipesView.tsx';
-import { FillSheet } from './tasks/sheet/FillSheet.tsx';
+import { useProofRun } from './tasks/proof/use-proof-run.ts';
 import { useUndoKeys } from './undo-keys.ts';
 
+// Nobody needs these for the first plan.
+const FinishedView = lazy(async () => ({ default: (await import('./tasks/finished/FinishedView.tsx')).FinishedView }));
+const MixingView = lazy(async () => ({ default: (await import('./tasks/mixing/MixingView.tsx')).MixingView }));
+const RecipesView = lazy(async () => ({ default: (await import('./tasks/recipes/RecipesView.tsx')).RecipesView }));
+const GasesView = lazy(() => import('./tasks/gases/GasesView.tsx'));
+const ProofView = lazy(() => import('./tasks/proof/ProofView.tsx'));
+// The sheet is fetched right after the first plan, long before anybody can print it.
+const FillSheet = lazy(async () => ({ default: (await import('./tasks/sheet/FillSheet.tsx')).FillSheet }));
+const ProofReport = lazy(() => import('./tasks/proof/ProofReport.tsx'));
+
 /** The workspace: slip at the left, the view in the middle, checks at the right. */
-export function App({ program }: { readonly program: string }) {
+export function App({ program, prover }: { readonly program: string; readonly prover: ProofRunner }) {
   const [view, setView] = useState<View>('plan');
   const answer = useWorkspaceState((state) => state.answer);
   const openId = useWorkspaceState((state) => state.openId);
+  const proof = useProofRun(prover);
   useUndoKeys();
   return (
     <ProblemsProvider answer={answer}>
-      <GasNames />
       <div className="screen">
         <Header view={view} onView={setView} />
         <OfflineNotice />
@@ -42,14 +49,19 @@ export function App({ program }: { readonly program: string }) {
           </div>
           <main className="middle" id="main">
             {view === 'plan' && <PlanView answer={answer} />}
-            {view === 'finished' && <FinishedView answer={answer} />}
-            {view === 'mixing' && <MixingView answer={answer} />}
-            {view === 'recipes' && <RecipesView onOpened={() => { setView('plan'); }} />}
+            <Suspense fallback={null}>
+              {view === 'finished' && <FinishedView answer={answer} />}
+              {view === 'mixing' && <MixingView answer={answer} />}
+              {view === 'recipes' && <RecipesView onOpened={() => { setView('plan'); }} />}
+              {view === 'gases' && <GasesView />}
+              {view === 'proof' && <ProofView proof={proof} />}
+            </Suspense>
           </main>
           <aside className="checks" aria-label="Checks"><ChecksPanel answer={answer} /></aside>
         </div>
       </div>
-      <FillSheet program={program} />
+      <Suspense fallback={null}><FillSheet program={program} /></Suspense>
+      {view === 'proof' && <Suspense fallback={null}><ProofReport state={proof.state} program={program} /></Suspense>}
     </ProblemsProvider>
   );
 }

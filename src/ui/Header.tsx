@@ -1,14 +1,17 @@
 import { editNote, renameRecipe, saveSentence } from '../state/index.ts';
 import { useActions, useWorkspaceState } from './bindings/workspace.tsx';
+import { printPage } from './parts/printing.ts';
 import { openHolds } from './tasks/checks/override.ts';
 
-export type View = 'plan' | 'finished' | 'mixing' | 'recipes';
+export type View = 'plan' | 'finished' | 'mixing' | 'recipes' | 'gases' | 'proof';
 
 const VIEWS: readonly (readonly [View, string])[] = [
   ['plan', 'Plan'],
   ['finished', 'Finished gas'],
   ['mixing', 'Mixing'],
   ['recipes', 'Recipes'],
+  ['gases', 'Gases'],
+  ['proof', 'Proof'],
 ];
 
 /** Name of the recipe, the views, saving, undo and the one thing that leaves the screen: the sheet. */
@@ -51,7 +54,7 @@ function PrintButton() {
   const overrides = useWorkspaceState((state) => state.recipe.overrides);
   const held = answer.ok && openHolds(answer.value.findings, overrides).length > 0;
   return (
-    <button type="button" className="print-button" disabled={!answer.ok} onClick={() => { window.print(); }}>
+    <button type="button" className="print-button" disabled={!answer.ok} onClick={() => { printPage('sheet'); }}>
       Print fill sheet{held ? ' (held)' : ''}
     </button>
   );

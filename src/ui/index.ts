@@ -3,3 +3,4 @@ import './styles/index.css';
 
 export { App } from './App.tsx';
 export { WorkspaceProvider } from './bindings/workspace.tsx';
+export { printedNow } from './parts/printing.ts';

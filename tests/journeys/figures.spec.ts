@@ -35,6 +35,7 @@ test('every figure that can be pressed shows formula, values and source', async 
     let opened = 0;
     for (const view of ['Plan', 'Finished gas'] as const) {
       await goTo(page, view);
+      await expect(page.getByRole('heading', { name: view === 'Plan' ? 'Fill ladder' : 'In the cylinder' })).toBeVisible();
       for (const figure of await page.getByRole('main').getByTitle('Show the working').all()) {
         await figure.click();
         await expect(dialog).toContainText(/=/);

@@ -42,7 +42,8 @@ function wordsOutside(words: string, width: number, height: number): string[] {
 function pdftotext(path: string, mode: '-bbox' | '-raw'): string {
   const program = findPdftotext();
   if (program === undefined) throw new Error('pdftotext was not found; `npm test` installs it.');
-  return execFileSync(program, [mode, path, '-'], { encoding: 'utf8' });
+  // A long report is more than Node's usual megabyte.
+  return execFileSync(program, [mode, path, '-'], { encoding: 'utf8', maxBuffer: 64_000_000 });
 }
 
 /** One page, nothing at its edge, and every word of the sheet on the paper. */

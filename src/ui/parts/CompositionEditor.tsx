@@ -1,5 +1,6 @@
 import type { CompositionLine } from '../../blending/index.ts';
 import { TextField } from './Field.tsx';
+import { GasField } from './GasField.tsx';
 import { SectionProblem } from './SectionProblem.tsx';
 
 interface CompositionEditorProps {
@@ -23,7 +24,7 @@ export function CompositionEditor({ path, legend, lines, onChange }: Composition
         const which = `line ${String(index + 1)} of ${legend}`;
         return (
           <div className="composition-line" key={index}>
-            <TextField bare field={`${field}.gas`} label={`gas, ${which}`} value={line.gas} list="gases" placeholder="gas" onChange={(gas) => { edit(index, { gas }); }} />
+            <GasField field={`${field}.gas`} label={`gas, ${which}`} value={line.gas} placeholder="gas" onChange={(gas) => { edit(index, { gas }); }} />
             <TextField bare field={`${field}.amount`} label={`amount, ${which}`} value={line.amount} placeholder="amount" onChange={(amount) => { edit(index, { amount }); }} />
             <button type="button" className="plain remove" aria-label={`Remove ${which}`} onClick={() => { onChange(lines.filter((_, place) => place !== index)); }}>×</button>
           </div>

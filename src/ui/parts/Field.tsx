@@ -11,12 +11,11 @@ interface FieldProps {
   readonly placeholder?: string;
   /** Hides the label from the eye where a table heading says it already. */
   readonly bare?: boolean;
-  readonly list?: string;
   readonly align?: 'left' | 'right';
 }
 
 /** One line of text with its label and, when it cannot be read, the sentence that says why. */
-export function TextField({ field, label, value, onChange, placeholder, bare = false, list, align = 'left' }: FieldProps) {
+export function TextField({ field, label, value, onChange, placeholder, bare = false, align = 'left' }: FieldProps) {
   return (
     <FieldFrame field={field} label={label} bare={bare}>
       {(aria) => (
@@ -28,7 +27,6 @@ export function TextField({ field, label, value, onChange, placeholder, bare = f
           spellCheck={false}
           value={value}
           placeholder={placeholder}
-          list={list}
           onChange={(event) => { onChange(event.currentTarget.value); }}
         />
       )}
@@ -106,13 +104,14 @@ export function ChoiceField<Choice extends string>({ field, label, value, choice
   );
 }
 
-interface FrameAria {
+export interface FrameAria {
   readonly id: string;
   readonly 'aria-invalid': boolean;
   readonly 'aria-describedby': string | undefined;
 }
 
-function FieldFrame(props: {
+/** Label, field and problem of one field of the recipe. */
+export function FieldFrame(props: {
   readonly field: string;
   readonly label: string;
   readonly bare: boolean;

@@ -1,10 +1,11 @@
 import { useState } from 'react';
 import type { ReactNode } from 'react';
-import type { Working } from '../../blending/index.ts';
+import { loadWorkings } from '../../blending/index.ts';
+import type { Working, Workings } from '../../blending/index.ts';
 import { Dialog } from './Dialog.tsx';
 
 /** A number that opens its working: formula, values, source. The working is made only when asked for. */
-export function WorkingFigure(props: { readonly explain: () => Working; readonly children: ReactNode; readonly className?: string }) {
+export function WorkingFigure(props: { readonly explain: (workings: Workings) => Working; readonly children: ReactNode; readonly className?: string }) {
   const [working, setWorking] = useState<Working | null>(null);
   return (
     <>
@@ -12,7 +13,7 @@ export function WorkingFigure(props: { readonly explain: () => Working; readonly
         type="button"
         className={`figure ${props.className ?? ''}`}
         title="Show the working"
-        onClick={() => { setWorking(props.explain()); }}
+        onClick={() => { void loadWorkings().then((workings) => { setWorking(props.explain(workings)); }); }}
       >
         {props.children}
       </button>

@@ -1,11 +1,12 @@
 import { lazy, Suspense, useMemo } from 'react';
-import { explainComponent, explainDeveloped, gasLabel, pressureOverTemperature } from '../../../blending/index.ts';
+import { gasLabel, pressureOverTemperature } from '../../../blending/index.ts';
 import type { Plan, PlanAnswer, PlannedComponent } from '../../../blending/index.ts';
 import { formatMass, formatSignificant, formatTemperature, formatVolume, fromPascal, pressureReading } from '../../../units/index.ts';
 import type { Pascal } from '../../../units/index.ts';
 import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
 import { amountText, percentNumber, pressureNumber, relativePercent, scaleLabel, scaleOf } from '../../parts/show.ts';
 import type { Scale } from '../../parts/show.ts';
+import { Condensation } from './Condensation.tsx';
 import { NotPlanned } from '../plan/NotPlanned.tsx';
 
 const PressureTemperatureChart = lazy(() => import('../../charts/PressureTemperatureChart.tsx'));
@@ -21,6 +22,7 @@ export function FinishedView({ answer }: { readonly answer: PlanAnswer }) {
       <IdealMistake plan={plan} />
       <Totals plan={plan} />
       <Developed plan={plan} scale={scale} />
+      <Condensation plan={plan} scale={scale} />
     </>
   );
 }
@@ -60,7 +62,7 @@ function ComponentRow({ plan, component }: { readonly plan: Plan; readonly compo
   return (
     <tr>
       <th scope="row">{formula} <small className="unit">{name}{nominal === null && ', not ordered'}</small></th>
-      <td className="number"><WorkingFigure explain={() => explainComponent(plan, component)}>{percentNumber(planned, digits)}</WorkingFigure></td>
+      <td className="number"><WorkingFigure explain={(workings) => workings.explainComponent(plan, component)}>{percentNumber(planned, digits)}</WorkingFigure></td>
       <td className="number">{formatSignificant(planned * 1e6, digits)}</td>
       <td className="number">{percentNumber(component.massFraction, digits)}</td>
       <td className="number">{component.volumeFraction === null ? '—' : percentNumber(component.volumeFraction, digits)}</td>
@@ -91,7 +93,9 @@ function Totals({ plan }: { readonly plan: Plan }) {
     ['Mean molar mass', `${formatSignificant(final.meanMolarMass * 1000, 6)} g/mol`],
     ['Compressibility factor Z', formatSignificant(finished.compressibilityFactor, 5)],
     ['Density', `${formatSignificant(final.massDensity, 4)} kg/m³`],
-    ['Filling ratio', `${formatSignificant(final.fillingRatio, 3)} kg gas per kg water`],
+    ['Filling ratio', plan.phase.finished.phase === 'unstable'
+      ? 'not stated: part of the blend would be liquid'
+      : `${formatSignificant(final.fillingRatio, 3)} kg gas per kg water`],
     ['Gas when let out into the room', formatVolume(final.releasedVolume)],
   ];
   return (
@@ -122,7 +126,7 @@ function Developed({ plan, scale }: { readonly plan: Plan; readonly scale: Scale
             <tr key={temperature}>
               <th scope="row">{formatTemperature(temperature)}</th>
               <td className="number">
-                <WorkingFigure explain={() => explainDeveloped(plan, pressure, temperature)}>{pressureNumber(pressure, scale)}</WorkingFigure>
+                <WorkingFigure explain={(workings) => workings.explainDeveloped(plan, pressure, temperature)}>{pressureNumber(pressure, scale)}</WorkingFigure>
               </td>
             </tr>
           ))}

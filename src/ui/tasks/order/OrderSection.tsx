@@ -4,6 +4,7 @@ import type { OrderLine, Plan } from '../../../blending/index.ts';
 import { addComponent, editComponent, editCylinder, editOrder, removeComponent, setOrderComponents } from '../../../state/index.ts';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
 import { TextField } from '../../parts/Field.tsx';
+import { GasField } from '../../parts/GasField.tsx';
 import { SectionProblem } from '../../parts/SectionProblem.tsx';
 import { PlannedCell } from './PlannedCell.tsx';
 
@@ -45,7 +46,7 @@ function ComponentRow({ line, index, plan }: { readonly line: OrderLine; readonl
   return (
     <tr>
       <td>
-        <TextField bare field={`${path}.gas`} label={`gas of component ${String(index + 1)}`} value={line.gas} list="gases" onChange={(gas) => { edit({ gas }); }} />
+        <GasField field={`${path}.gas`} label={`gas of component ${String(index + 1)}`} value={line.gas} onChange={(gas) => { edit({ gas }); }} />
       </td>
       <td>
         <TextField bare align="right" field={`${path}.amount`} label={`nominal amount of ${name}`} value={line.amount} onChange={(amount) => { edit({ amount }); }} />

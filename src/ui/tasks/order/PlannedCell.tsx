@@ -1,4 +1,4 @@
-import { explainComponent, gasFromText } from '../../../blending/index.ts';
+import { gasFromText } from '../../../blending/index.ts';
 import type { Plan } from '../../../blending/index.ts';
 import { amountText } from '../../parts/show.ts';
 import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
@@ -8,5 +8,5 @@ export function PlannedCell({ plan, gasText }: { readonly plan: Plan | null; rea
   const gas = gasFromText(gasText);
   const component = plan?.final.components.find((candidate) => candidate.gas === gas?.id);
   if (plan === null || component === undefined) return <span aria-label="not planned">—</span>;
-  return <WorkingFigure explain={() => explainComponent(plan, component)}>{amountText(component.planned, 4)}</WorkingFigure>;
+  return <WorkingFigure explain={(workings) => workings.explainComponent(plan, component)}>{amountText(component.planned, 4)}</WorkingFigure>;
 }

@@ -1,4 +1,4 @@
-import { useLayoutEffect, useRef, useState } from 'react';
+import { memo, useDeferredValue, useLayoutEffect, useRef, useState } from 'react';
 import type { RefObject } from 'react';
 import type { Plan, PlanAnswer } from '../../../blending/index.ts';
 import { ModelLine } from './ModelLine.tsx';
@@ -9,8 +9,12 @@ import { StepTable } from './StepTable.tsx';
 
 /** Width of the column of row names, as in the style sheet. */
 const ROW_NAMES = 116;
-const NARROWEST_COLUMN = 104;
+/** Six of them fit into the middle of a 1280 px window. */
+const NARROWEST_COLUMN = 84;
 const WIDEST_COLUMN = 210;
+
+const Ladder = memo(FillLadder);
+const Curve = memo(FillCurve);
 
 /** The plan in picture and numbers, or what stands in its way. */
 export function PlanView({ answer }: { readonly answer: PlanAnswer }) {
@@ -20,6 +24,8 @@ export function PlanView({ answer }: { readonly answer: PlanAnswer }) {
 function Planned({ plan }: { readonly plan: Plan }) {
   const frame = useRef<HTMLDivElement>(null);
   const width = useWidth(frame);
+  // Drawing takes longer than planning: the figures follow each key at once, the pictures when there is time.
+  const drawn = useDeferredValue(plan);
   const hasStart = plan.job.cylinder.contents.state === 'residual';
   const columns = plan.steps.length + (hasStart ? 1 : 0);
   const columnWidth = Math.min(WIDEST_COLUMN, Math.max(NARROWEST_COLUMN, Math.floor((width - ROW_NAMES) / columns)));
@@ -27,11 +33,11 @@ function Planned({ plan }: { readonly plan: Plan }) {
     <section aria-labelledby="ladder-title">
       <h2 id="ladder-title">Fill ladder</h2>
       <div ref={frame} className="ladder" tabIndex={0} role="group" aria-labelledby="ladder-title">
-        <FillLadder plan={plan} columnWidth={columnWidth} hasStart={hasStart} />
+        <Ladder plan={drawn} columnWidth={columnWidth} hasStart={hasStart} />
         <StepTable plan={plan} columnWidth={columnWidth} hasStart={hasStart} />
       </div>
       <ModelLine plan={plan} />
-      <FillCurve plan={plan} />
+      <Curve plan={drawn} />
     </section>
   );
 }

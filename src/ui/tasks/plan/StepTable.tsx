@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { explainIdealStop, explainMass, explainStop, gasLabel } from '../../../blending/index.ts';
+import { gasLabel } from '../../../blending/index.ts';
 import type { Plan, PlanStep } from '../../../blending/index.ts';
 import { formatMass, formatNumber, formatSignificant, formatTemperature, fromPascal } from '../../../units/index.ts';
 import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
@@ -18,7 +18,10 @@ export function StepTable({ plan, columnWidth, hasStart }: StepTableProps) {
   const byMass = job.by !== 'pressure';
   const start = hasStart ? <StartCell plan={plan} /> : null;
   return (
-    <table className="steps" style={{ width: `calc(var(--row-names) + ${String(columnWidth * (steps.length + (hasStart ? 1 : 0)))}px)` }}>
+    <table
+      className="steps"
+      style={{ width: `calc(var(--row-names) + ${String(columnWidth * (steps.length + (hasStart ? 1 : 0)))}px)`, ['--column' as string]: `${String(columnWidth)}px` }}
+    >
       <colgroup>
         <col className="row-names" />
         {hasStart && <col style={{ width: columnWidth }} />}
@@ -75,7 +78,7 @@ function StopRow({ plan, start, small = false }: { readonly plan: Plan; readonly
         const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
         return (
           <td key={step.number}>
-            <WorkingFigure className={small ? '' : 'act'} explain={() => explainStop(plan, step)}>
+            <WorkingFigure className={small ? '' : 'act'} explain={(workings) => workings.explainStop(plan, step)}>
               {pressureNumber(step.state.pressure, scale)}
             </WorkingFigure>
             <span className="unit">{scaleLabel(scale)}</span>
@@ -95,7 +98,7 @@ function MassRow({ plan, hasStart, large }: { readonly plan: Plan; readonly hasS
       {hasStart && <td />}
       {plan.steps.map((step) => (
         <td key={step.number}>
-          <WorkingFigure className={large ? 'act' : ''} explain={() => explainMass(plan, step)}>
+          <WorkingFigure className={large ? 'act' : ''} explain={(workings) => workings.explainMass(plan, step)}>
             +{formatMass(step.weighing.readingGain, balanceResolution)}
           </WorkingFigure>
           {step.weighing.reading !== null && <span className="unit">reads {formatMass(step.weighing.reading, balanceResolution)}</span>}
@@ -143,7 +146,7 @@ function IdealRow({ plan, hasStart }: { readonly plan: Plan; readonly hasStart: 
         return (
           <td key={step.number}>
             {step.idealStop === null ? 'no plan' : (
-              <WorkingFigure explain={() => explainIdealStop(plan, step)}>
+              <WorkingFigure explain={(workings) => workings.explainIdealStop(plan, step)}>
                 {pressureNumber(step.idealStop, scale)} <small>{relativePercent(step.idealStop, step.state.pressure)}</small>
               </WorkingFigure>
             )}

@@ -1,7 +1,7 @@
-import { gasLabel } from '../../../blending/index.ts';
+import { gasLabel, modelName, STRIP_CELSIUS } from '../../../blending/index.ts';
 import type { Finding, Plan, PlanStep } from '../../../blending/index.ts';
 import { sheetIdentity } from '../../../state/index.ts';
-import { formatMass, formatTemperature, formatVolume } from '../../../units/index.ts';
+import { celsius, formatMass, formatTemperature, formatVolume } from '../../../units/index.ts';
 import { useWorkspaceState } from '../../bindings/workspace.tsx';
 import { amountText, parentName, pressureNumber, scaleLabel, scaleOf } from '../../parts/show.ts';
 import { openHolds, standingOverride } from '../checks/override.ts';
@@ -38,15 +38,16 @@ export function FillSheet({ program }: { readonly program: string }) {
       <section className="sheet-signatures">
         {['Planned by, date', 'Second check, date', 'Filled by, date', 'Leak test, rolling start and end'].map((role) => <p key={role}><span>{role}</span></p>)}
       </section>
-      <footer>{program} · real gas: GERG-2008 · R {plan.gasConstant} J/(mol K) · barometer {pressureNumber(plan.job.conditions.barometer, { unit: 'hPa', reference: 'absolute', resolution: 1, barometer: plan.job.conditions.barometer })} hPa absolute</footer>
+      <footer>{program} · real gas: {modelName(plan.job.gases)} · R {plan.gasConstant} J/(mol K) · barometer {pressureNumber(plan.job.conditions.barometer, { unit: 'hPa', reference: 'absolute', resolution: 1, barometer: plan.job.conditions.barometer })} hPa absolute</footer>
     </article>
   );
 }
 
-/** Whether the boxes must be lower for everything to stay on one page. */
+/** Whether everything must be set smaller to stay on one page. The heights are rough, in mm on Letter, the lower paper. */
 function isDense({ steps, findings }: Plan): boolean {
-  // A step takes the room of two findings; sixteen fit on Letter with boxes of full height.
-  return 2 * steps.length + findings.filter(({ verdict }) => verdict !== 'note').length > 15;
+  const holds = findings.filter(({ verdict }) => verdict === 'hold').length;
+  const cautions = findings.filter(({ verdict }) => verdict === 'caution').length;
+  return 16 * steps.length + 5 * (holds + cautions) + (holds > 0 ? 9 + 7 * holds : 0) > 125;
 }
 
 function Holds({ plan }: { readonly plan: Plan }) {
@@ -155,9 +156,10 @@ function StepRows({ plan, step, byMass }: { readonly plan: Plan; readonly step: 
         <tr className="sheet-strip">
           <td colSpan={byMass ? 7 : 6}>
             <span>stop, {scaleLabel(scale)}, at</span>
-            {step.strip.map(({ temperature, pressure }) => (
-              <span key={temperature}>{formatTemperature(temperature)}: <b>{pressureNumber(pressure, scale)}</b></span>
-            ))}
+            {STRIP_CELSIUS.map((degrees) => {
+              const point = step.strip.find(({ temperature }) => celsius(temperature) === degrees);
+              return <span key={degrees}>{degrees} °C: <b>{point === undefined ? 'no gas' : pressureNumber(point.pressure, scale)}</b></span>;
+            })}
           </td>
         </tr>
       )}

@@ -1,0 +1,58 @@
+import type { ProofRunner, ProofUpdate } from '../blending/index.ts';
+import { inlineRunner } from './inline.ts';
+import type { WorkerAnswer, WorkerRequest } from './protocol.ts';
+
+/** The little of a worker that is used here. */
+export interface WorkerLike {
+  postMessage(request: WorkerRequest): void;
+  terminate(): void;
+  onmessage: ((event: { readonly data: WorkerAnswer }) => void) | null;
+  onerror: ((event: { readonly message?: string; preventDefault?(): void }) => void) | null;
+}
+
+/**
+ * Runs the proof in a worker. A browser that grants none, or one that cannot load it,
+ * gets the same work on the page's own thread; a worker that breaks off later is
+ * reported as failed.
+ */
+export function proofRunner(make: () => WorkerLike | null = makeWorker, fallback: ProofRunner = inlineRunner()): ProofRunner {
+  return {
+    start(report) {
+      const worker = make();
+      if (worker === null) return fallback.start(report);
+      let begun = false;
+      let stop = () => { worker.terminate(); };
+      const end = (update: ProofUpdate) => {
+        worker.terminate();
+        report(update);
+      };
+      worker.onmessage = ({ data }) => {
+        begun = true;
+        if (data.kind === 'finished' || data.kind === 'failed') end(data);
+        else report(data);
+      };
+      worker.onerror = (event) => {
+        event.preventDefault?.();
+        if (begun) {
+          end({ kind: 'failed', message: event.message ?? 'the worker ended' });
+          return;
+        }
+        worker.terminate();
+        stop = fallback.start(report);
+      };
+      worker.postMessage({ kind: 'prove' });
+      return () => { stop(); };
+    },
+  };
+}
+
+/** null where the browser has no workers or refuses this one. */
+function makeWorker(): WorkerLike | null {
+  if (typeof Worker === 'undefined') return null;
+  try {
+    return new Worker(new URL('./entry.ts', import.meta.url), { type: 'module', name: 'proof' }) as WorkerLike;
+  } catch (error) {
+    if (error instanceof DOMException) return null;
+    throw error;
+  }
+}

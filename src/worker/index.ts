@@ -1,0 +1,3 @@
+/** Door of the worker layer (level 3): work that takes longer than a frame or two, on a thread of its own. */
+export { proofRunner } from './client.ts';
+export { inlineRunner } from './inline.ts';
