@@ -2,7 +2,7 @@ import {
   celsius, formatAmountFraction, formatMass, formatNumber, formatPressureInFull, formatSignificant, formatTemperature, fraction, pascal,
 } from '../../units/index.ts';
 import type { Kelvin, Pascal } from '../../units/index.ts';
-import { gasRecord } from '../../thermo/index.ts';
+import { gasEquation, gasRecord } from '../../thermo/index.ts';
 import { gasLabel } from '../gases.ts';
 import type { Job, JobGauge } from '../recipe/job.ts';
 import type { CylinderState, Plan, PlannedComponent, PlanStep } from '../plan/plan.ts';
@@ -26,7 +26,7 @@ export function explainStop(plan: Plan, step: PlanStep): Working {
       { symbol: 'p_atm', meaning: 'barometer', value: absolute(plan.job.conditions.barometer, plan.job) },
     ],
     result: `${absolute(step.state.pressure, plan.job)} = ${shown(step.state.pressure, plan.job, gauge)}`,
-    source: `${MODEL_SOURCE}; cylinder growth: thin-wall formula, editable`,
+    source: `${modelSource(plan.job)}; cylinder growth: thin-wall formula, editable`,
   };
 }
 
@@ -95,8 +95,17 @@ export function explainDeveloped(plan: Plan, pressure: Pascal, temperature: Kelv
     formula: 'p V(p, T) = N Z(x, p, T) R T with N as filled',
     lines: stateLines(plan, plan.finished).slice(0, 2),
     result: absolute(pressure, plan.job),
-    source: MODEL_SOURCE,
+    source: modelSource(plan.job),
   };
+}
+
+/** The model, and the equation of each gas that is not one of GERG-2008's own. */
+function modelSource(job: Job): string {
+  const others = job.gases.flatMap((gas) => {
+    const { kind, source } = gasEquation(gas);
+    return kind === 'GERG-2008' ? [] : [`${gasLabel(gas).formula}: ${source}`];
+  });
+  return [MODEL_SOURCE, ...others].join('; ');
 }
 
 function stateLines(plan: Plan, state: CylinderState): WorkingLine[] {

@@ -1,68 +1,13 @@
+import { helmholtzGases } from './helmholtz/gases.ts';
+import { kunzWagnerGases } from './kunz-wagner-2012/gases.ts';
+import { pengRobinsonGases } from './peng-robinson/gases.ts';
+
 /**
  * Every gas the program has an equation for, by the key used in all its files:
  * those of GERG-2008, those with another published Helmholtz equation, those
  * left to Peng–Robinson.
  */
-export const gasIds = [
-  'methane',
-  'nitrogen',
-  'carbon dioxide',
-  'ethane',
-  'propane',
-  'isobutane',
-  'n-butane',
-  'isopentane',
-  'n-pentane',
-  'n-hexane',
-  'n-heptane',
-  'n-octane',
-  'n-nonane',
-  'n-decane',
-  'hydrogen',
-  'oxygen',
-  'carbon monoxide',
-  'water',
-  'hydrogen sulfide',
-  'helium',
-  'argon',
-  'neon',
-  'krypton',
-  'xenon',
-  'neopentane',
-  'toluene',
-  'carbonyl sulfide',
-  'nitrous oxide',
-  'acetone',
-  'deuterium',
-  'ethylene',
-  'propylene',
-  'isobutene',
-  '1-butene',
-  'benzene',
-  'sulfur dioxide',
-  'ammonia',
-  'hydrogen chloride',
-  'chlorine',
-  'sulfur hexafluoride',
-  'tetrafluoromethane',
-  'r134a',
-  'ethylene oxide',
-  'methanol',
-  'ethanol',
-  'trifluoromethane',
-  'vinyl chloride',
-  'acetylene',
-  'methyl mercaptan',
-  'nitric oxide',
-  'nitrogen dioxide',
-  'hydrogen fluoride',
-  'hydrogen cyanide',
-  'phosphine',
-  'arsine',
-  'silane',
-  'formaldehyde',
-  '1,3-butadiene',
-] as const;
+export const gasIds = [...kunzWagnerGases, ...helmholtzGases, ...pengRobinsonGases] as const;
 
 /** The key of one gas. */
 export type GasId = (typeof gasIds)[number];

@@ -7,7 +7,7 @@ describe('xoshiro128**', () => {
     expect(Array.from({ length: 4 }, next)).toEqual([11520, 0, 5927040, 70819200]);
   });
 
-  it('equals a transcription with exact integers over a thousand numbers', () => {
+  it('equals the same steps written with exact integers over a thousand numbers', () => {
     const mask = 0xffffffffn;
     const rotate = (word: bigint, by: bigint) => ((word << by) | (word >> (32n - by))) & mask;
     const state = [0x9e3779b9n, 0x243f6a88n, 0xb7e15162n, 0xffffffffn];

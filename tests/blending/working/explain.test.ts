@@ -66,3 +66,9 @@ describe('a working says the numbers of the plan', () => {
     expect(line(explainComponent(plan, component), 'φᵢ')).toBe('not stated: not known to be a gas at that state');
   });
 });
+
+it('a working names the equation of each gas that is not one of GERG-2008', () => {
+  const plan = planned({ order: [['SO2', '0.1 %'], ['N2', 'balance']], to: '100 bar' });
+  expect(explainStop(plan, plan.steps[1]!).source).toMatch(/GERG-2008.*SO₂: .*Gao/);
+  expect(explainStop(plan, plan.steps[1]!).source).not.toContain('N₂:');
+});

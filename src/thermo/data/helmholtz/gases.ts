@@ -1,5 +1,3 @@
-import type { GasId } from '../gases.ts';
-
 /** The gases outside GERG-2008 that have a published Helmholtz equation. */
 export const helmholtzGases = [
   'neon',
@@ -28,7 +26,7 @@ export const helmholtzGases = [
   'ethanol',
   'trifluoromethane',
   'vinyl chloride',
-] as const satisfies readonly GasId[];
+] as const;
 
 /** One of them. */
 export type HelmholtzGas = (typeof helmholtzGases)[number];

@@ -1,5 +1,3 @@
-import type { GasId } from '../gases.ts';
-
 /** The 21 components of GERG-2008, in the order of the NIST code. */
 export const kunzWagnerGases = [
   'methane',
@@ -23,7 +21,7 @@ export const kunzWagnerGases = [
   'hydrogen sulfide',
   'helium',
   'argon',
-] as const satisfies readonly GasId[];
+] as const;
 
 /** One of the 21 components of GERG-2008. */
 export type KunzWagnerGas = (typeof kunzWagnerGases)[number];

@@ -1,5 +1,3 @@
-import type { GasId } from '../gases.ts';
-
 /** The gases without a published Helmholtz equation: Peng–Robinson has to do. */
 export const pengRobinsonGases = [
   'acetylene',
@@ -13,7 +11,7 @@ export const pengRobinsonGases = [
   'silane',
   'formaldehyde',
   '1,3-butadiene',
-] as const satisfies readonly GasId[];
+] as const;
 
 /** One of them. */
 export type PengRobinsonGas = (typeof pengRobinsonGases)[number];
