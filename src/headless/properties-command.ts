@@ -1,6 +1,6 @@
 import { fail, kelvin, molePerCubicMetre, ok, pascal } from '../units/index.ts';
 import type { Outcome } from '../units/index.ts';
-import { findGas, modelName, phaseOf, realModel } from '../thermo/index.ts';
+import { findGas, gasIds, modelName, phaseOf, realModel } from '../thermo/index.ts';
 import type { GasId, Phase, ThermoModel, ThermoReason, ThermoState } from '../thermo/index.ts';
 import type { CommandAnswer } from './run.ts';
 import { readFlags } from './flags.ts';
@@ -91,22 +91,22 @@ function readRequest(state: unknown): Outcome<StateRequest, StateReason> {
   if (unknown !== undefined) return fail({ code: 'field-unknown', field: unknown });
   const { composition, temperature_K, pressure_kPa, density_mol_per_L } = state;
   if (!isRecord(composition)) return fail({ code: 'field-not-a-number', field: 'composition' });
-  const gases: GasId[] = [];
-  const x: number[] = [];
+  const parts: { readonly gas: GasId; readonly x: number }[] = [];
   for (const [name, value] of Object.entries(composition)) {
     const gas = findGas(name);
     if (gas === undefined) return fail({ code: 'unknown-gas', gas: name });
     if (typeof value !== 'number') return fail({ code: 'field-not-a-number', field: `composition.${name}` });
-    gases.push(gas);
-    x.push(value);
+    parts.push({ gas, x: value });
   }
+  // In one order, so that states of the same gases share one compiled model however their keys are written.
+  parts.sort((a, b) => gasIds.indexOf(a.gas) - gasIds.indexOf(b.gas));
   if (typeof temperature_K !== 'number') return fail({ code: 'field-not-a-number', field: 'temperature_K' });
   if ((pressure_kPa === undefined) === (density_mol_per_L === undefined)) return fail({ code: 'pressure-or-density' });
   if (pressure_kPa !== undefined && typeof pressure_kPa !== 'number') return fail({ code: 'field-not-a-number', field: 'pressure_kPa' });
   if (density_mol_per_L !== undefined && typeof density_mol_per_L !== 'number') {
     return fail({ code: 'field-not-a-number', field: 'density_mol_per_L' });
   }
-  return ok({ gases, x, temperature_K, pressure_kPa: pressure_kPa ?? null, density_mol_per_L: density_mol_per_L ?? null });
+  return ok({ gases: parts.map(({ gas }) => gas), x: parts.map((part) => part.x), temperature_K, pressure_kPa: pressure_kPa ?? null, density_mol_per_L: density_mol_per_L ?? null });
 }
 
 function isRecord(value: unknown): value is Record<string, unknown> {

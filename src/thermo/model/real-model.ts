@@ -166,7 +166,7 @@ function densityOutcome(result: DensityResult, temperature: number, pressure: nu
 
 /** Compiled models by gas constant and gases, in order of last use. */
 const compiled = new Map<string, RealModel>();
-const MOST_COMPILED = 64;
+const MOST_COMPILED = 256;
 
 /**
  * The multi-fluid model of a list of gases: GERG-2008 (Kunz and Wagner, J. Chem.
