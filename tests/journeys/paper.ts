@@ -20,6 +20,8 @@ const EDGE = 12;
 
 /** Prints the page and reads the PDF back with poppler's pdftotext. */
 export async function print(page: Page, size: PaperSize, info: TestInfo): Promise<Paper> {
+  // The sheet is a chunk that comes right after the first plan; no hand is as fast as this function.
+  await page.locator('article[aria-label="Fill sheet"]').waitFor({ state: 'attached' });
   const path = info.outputPath(`sheet-${size}-${performance.now().toFixed(0)}.pdf`);
   writeFileSync(path, await page.pdf({ format: size, printBackground: true }));
   const boxes = pdftotext(path, '-bbox');
