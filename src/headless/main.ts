@@ -1,9 +1,9 @@
-import { loadAllGases } from '../blending/index.ts';
+import { loadRest } from '../blending/index.ts';
 import { proofCommand } from './proof-command.ts';
 import { run, USAGE } from './run.ts';
 
 /* Entry of the command line: the arguments in, one JSON value out. */
-await loadAllGases();
+await loadRest({ patient: true });
 const args = process.argv.slice(2);
 const { output, exitCode } = args[0] === 'proof' ? await prove(args.length === 1) : run(args);
 process.stdout.write(`${output}\n`);

@@ -1,13 +1,13 @@
 import type { Recipe } from '../blending/index.ts';
 
-/** One intent of the technician, as a value: history decides how it enters undo. */
-export interface Command {
-  /** What undo calls it, in plain words ("fill pressure", "methane amount"); told from the recipe before. */
-  readonly label: (before: Recipe) => string;
+/** One intent of the technician, as a value: history decides how it enters undo. Of a recipe unless said. */
+export interface Command<Document = Recipe> {
+  /** What undo calls it, in plain words ("fill pressure", "methane amount"); told from the document before. */
+  readonly label: (before: Document) => string;
   /** Consecutive commands with the same key within 2 s are one undo step; null: always its own step. */
   readonly merge: string | null;
-  /** The recipe afterwards; never changes its argument. */
-  readonly apply: (recipe: Recipe) => Recipe;
+  /** The document afterwards; never changes its argument. */
+  readonly apply: (document: Document) => Document;
 }
 
 /** The words for the fields of one record, as undo shows them. */

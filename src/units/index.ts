@@ -6,6 +6,7 @@ export {
   absolutePressure, fromPascal, gaugeReading, PRESSURE_UNITS, pressureReading, toPascal,
   type PressureReference, type PressureScale, type PressureUnit,
 } from './pressure.ts';
+export { parseNumberText } from './number-text.ts';
 export * from './pressure-entry.ts';
 export * from './quantity-entry.ts';
 export * from './ratio-entry.ts';

@@ -1,4 +1,4 @@
-import { emptyRecipe, planRecipe } from '../../src/blending/index.ts';
+import { defaultRoute, emptyRecipe, parentNamed, planRecipe, purityTable } from '../../src/blending/index.ts';
 import type { Recipe } from '../../src/blending/index.ts';
 import type { Benchmark } from './benchmark.ts';
 
@@ -20,11 +20,9 @@ function recipe(fillPressure: string): Recipe {
       testPressure: { typed: '250 bar', reference: 'gauge' },
       contents: { ...emptyRecipe.cylinder.contents, state: 'evacuated', pressure: { typed: '0.01 mbar', reference: 'absolute' } },
     },
-    parents: gases.map(([gas]) => ({
-      key: gas, name: gas, composition: [{ gas, amount: '100 %' }], pressure: { typed: '', reference: 'gauge' },
-    })),
-    gauges: [{ key: 'g1', name: 'G1', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.05 %', resolution: '0.01 bar' }],
-    route: { by: 'pressure and mass', sequence: 'smallest first', steps: [] },
+    parents: gases.map(([gas]) => parentNamed(gas, gas, { composition: purityTable([{ gas, amount: '100 %' }]) })),
+    gauges: [{ key: 'g1', name: 'G1', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.05 %', accuracyOf: 'span', resolution: '0.01 bar', calibrated: '' }],
+    route: { ...defaultRoute, by: 'pressure and mass' },
   };
 }
 

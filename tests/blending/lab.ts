@@ -1,5 +1,5 @@
 import { expect } from 'vitest';
-import { defaultCylinder, defaultContents, emptyRecipe, planRecipe } from '../../src/blending/index.ts';
+import { defaultCylinder, defaultContents, defaultRoute, emptyRecipe, parentNamed, planRecipe, purityTable } from '../../src/blending/index.ts';
 import type {
   CompositionLine, Conditions, Contents, Cylinder, Job, Parent, Plan, PlanOptions, Recipe, RecipeProblem, Sequence,
 } from '../../src/blending/index.ts';
@@ -38,7 +38,9 @@ export function pure(gas: string, pressure = ''): Supply {
 }
 
 function parentOf({ key, lines, pressure }: Supply): Parent {
-  return { key, name: `Parent ${key}`, composition: lines.map(compositionLine), pressure: { typed: pressure ?? '', reference: 'absolute' } };
+  return parentNamed(key, `Parent ${key}`, {
+    composition: purityTable(lines.map(compositionLine)), pressure: { typed: pressure ?? '', reference: 'absolute' },
+  });
 }
 
 function compositionLine([gas, amount]: Line): CompositionLine {
@@ -68,7 +70,7 @@ export function recipeOf(fill: Fill): Recipe {
     },
     parents: supplies.map(parentOf),
     route: {
-      by: 'pressure and mass', sequence: fill.sequence ?? 'as listed',
+      ...defaultRoute, by: 'pressure and mass', sequence: fill.sequence ?? 'as listed',
       steps: Object.entries(fill.at ?? {}).map(([parent, gasTemperature]) => ({ parent, gasTemperature, gauge: '' })),
     },
     conditions: { ...emptyRecipe.conditions, barometer: '1.01325 bar', ...fill.conditions },

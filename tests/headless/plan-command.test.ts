@@ -74,7 +74,7 @@ describe('plan', () => {
 
   it.each([
     ['', 'not-json'], ['{', 'not-json'], ['[]', 'not-a-recipe-file'], ['{"format":"other"}', 'not-a-recipe-file'],
-    [exampleText.replace('"version": 1', '"version": 99'), 'newer-version'], [exampleText.replace('"150 bar"', '150'), 'field-invalid'],
+    [exampleText.replace('"version": 2', '"version": 99'), 'newer-version'], [exampleText.replace('"150 bar"', '150'), 'field-invalid'],
   ])('a file that is none: %#', (text, code) => {
     expect(plan(text)).toMatchObject({ exitCode: 1, answer: { ok: false, reason: { code } } });
   });

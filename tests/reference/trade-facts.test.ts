@@ -17,7 +17,7 @@ function ideally(fill: Fill) {
   const model = valueOf(idealModel(job.gases));
   const vessel: Vessel = { cylinder: job.cylinder, barometer: job.conditions.barometer };
   const amounts = valueOf(solveAmounts(job, model, vessel));
-  const order = job.parents.map((_, index) => index);
+  const order = job.parents.map((_, parent) => ({ parent, share: 1 }));
   const { steps } = valueOf(fillStates(job, model, vessel, amounts, order, new Float64Array(job.gases.length).fill(0.03)));
   const finished = valueOf(settle(model, vessel, amounts.finished, job.order.fillTemperature));
   return { job, steps, finished, mixing: valueOf(mixingOfFill(job, model, amounts, finished)) };

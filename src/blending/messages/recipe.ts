@@ -33,8 +33,26 @@ export function recipeSentence(problem: RecipeProblem): string {
       return 'The value must be above zero.';
     case 'barometer-unlikely':
       return `The air pressure must lie between ${hectopascal(problem.lowest)} and ${hectopascal(problem.highest)} absolute: look at its number and its unit.`;
+    case 'origin-missing':
+      return 'Say where and when the laboratory read its value: without both it cannot be checked.';
+    case 'number-alone':
+      return `“${problem.text.trim()}” is more than a number: the unit is that of the published value.`;
+    case 'value-beyond':
+      return `The value must lie between ${String(problem.lowest)} and ${String(problem.highest)}.`;
     case 'no-parents':
       return 'Enter the parent gases to fill from.';
+    case 'not-a-count':
+      return `Enter a whole number from 1 to ${String(problem.most)}.`;
+    case 'share-outside':
+      return 'The share that goes in early must lie between 0 and 100 %.';
+    case 'purge-not-above':
+      return 'Each cycle must fill to a pressure above the one it goes down to.';
+    case 'purge-without-parent':
+      return 'Choose the parent gas that purges.';
+    case 'purge-without-end':
+      return 'State how many cycles, or how much of the old gas may be left.';
+    case 'purge-never-ends':
+      return `After ${String(problem.cycles)} cycles ${amount(problem.oldGas)} of the old gas is still there: pump lower or fill higher in each cycle.`;
     case 'key-repeated':
       return `The key “${problem.key}” is used twice.`;
     case 'component-without-parent':

@@ -7,6 +7,8 @@ import type { Kelvin, Outcome, Pascal } from '../../units/index.ts';
 import { isSupercritical, testStability } from '../../thermo/index.ts';
 import type { GasId, ThermoModel } from '../../thermo/index.ts';
 import type { CylinderState } from '../plan/plan.ts';
+import { valueIn } from '../values/value.ts';
+import type { RuleValue } from '../values/value.ts';
 import type { Job } from '../recipe/job.ts';
 import { settle } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
@@ -51,7 +53,7 @@ export interface PlanPhase {
 }
 
 /** How much colder than stated the cylinder is looked at as well, K (our own choice, about the error of a dew line). */
-export const COLDER_BY = 5;
+export const colderBy: RuleValue = { id: 'colder-than-storage', value: 5 };
 /** Dew pressures are sought up to this part of the fill pressure: beyond it there is margin enough. */
 const SEARCHED = 1.5;
 
@@ -67,13 +69,13 @@ export function phaseOfPlan(
     steps: tested,
     // Mostly the last step is the finished gas; then one test does for both.
     finished: (last !== undefined && isOneState(last, finished) ? tested.at(-1) : null) ?? phaseOfState(model, finished),
-    coldest: coldest === null ? null : coldestPhase(model, vessel, finished, coldest),
+    coldest: coldest === null ? null : coldestPhase(model, vessel, finished, coldest, valueIn(job.values, colderBy)),
     guessedPairs: guessedPairs(model),
   };
 }
 
 /** Asked of the even mixture: the plan's own would leave the pairs of traces out, and a trace may be what condenses. */
-function guessedPairs(model: ThermoModel): PlanPhase['guessedPairs'] {
+export function guessedPairs(model: ThermoModel): PlanPhase['guessedPairs'] {
   const { gases } = model;
   const trust = model.trust(molePerCubicMetre(1), gases.map(() => 1 / gases.length));
   if (!trust.ok) return gases.flatMap((first) => gases.map((second) => [first, second] as const));
@@ -94,14 +96,14 @@ export function phaseOfState(model: ThermoModel, state: Pick<CylinderState, 'tem
   return { phase: isSupercritical(model, temperature, fractions) ? 'supercritical' : 'gas' };
 }
 
-function coldestPhase(model: ThermoModel, vessel: Vessel, finished: CylinderState, temperature: Kelvin): ColdestPhase {
+function coldestPhase(model: ThermoModel, vessel: Vessel, finished: CylinderState, temperature: Kelvin, colder: number): ColdestPhase {
   const searchedTo = pascal(SEARCHED * finished.pressure);
   const limit = largestFill(model, vessel, finished, temperature, searchedTo);
   return {
     temperature,
     searchedTo,
     largestFill: !limit.ok && limit.reason.code === 'no-dew-point' ? ok(null) : limit,
-    slightlyColder: closedAt(model, vessel, finished, kelvin(temperature - COLDER_BY)),
+    slightlyColder: closedAt(model, vessel, finished, kelvin(temperature - colder)),
   };
 }
 

@@ -2,6 +2,8 @@ import { cubicMetre, fail, mole, ok, pascal } from '../../units/index.ts';
 import type { Kelvin, Mole, Outcome, Pascal } from '../../units/index.ts';
 import type { ThermoModel, ThermoReason } from '../../thermo/index.ts';
 import type { Job } from '../recipe/job.ts';
+import { conditionCylinder } from '../steps/conditioning.ts';
+import type { Conditioned, ConditionedStep, ConditioningProblem } from '../steps/conditioning.ts';
 import { cylinderVolume, settle, totalAmount } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
 import { unitDensity } from '../steps/unit-density.ts';
@@ -11,8 +13,10 @@ import { leastSquares, nonNegativeLeastSquares } from './least-squares.ts';
 export interface FillAmounts {
   /** mol from each parent, aligned with `Job.parents`. */
   readonly additions: readonly number[];
-  /** mol of each gas left in the cylinder before the first addition, aligned with `Job.gases`. */
+  /** mol of each gas left in the cylinder before the first addition, conditioning done, aligned with `Job.gases`. */
   readonly residual: Float64Array;
+  /** What the conditioning did, act by act. */
+  readonly conditioned: readonly ConditionedStep[];
   /** mol of each gas in the finished cylinder. */
   readonly finished: Float64Array;
   readonly total: Mole;
@@ -31,14 +35,17 @@ export type AmountProblem =
   /** The residual holds too much of something; `ventTo` (absolute) would do, null: evacuate. */
   | { readonly code: 'residual-in-the-way'; readonly gases: readonly number[]; readonly ventTo: Pascal | null; readonly nearest: NearestBlend }
   | { readonly code: 'fill-pressure-too-low'; readonly residualPressure: Pascal }
+  | Extract<ConditioningProblem, { readonly code: 'purge-never-ends' }>
   | { readonly code: 'state'; readonly where: 'residual' | 'finished gas'; readonly reason: ThermoReason };
 
 /** An ordered fraction counts as met within this relative distance. */
-const MET = 1e-9;
+export const MET = 1e-9;
 /** How far the balance may fall short, relative, for gases that nobody ordered, when its line states no tolerance (our own choice). */
-const BALANCE_MET = 0.02;
+export const BALANCE_MET = 0.02;
 /** Weight of "bring nothing that was not ordered" beside the fractions: enough to choose, too little to bend them. */
 const PURITY_WEIGHT = 1e-5;
+/** Part of the total below which a parent is a leftover of rounding, not a choice. */
+const LEFTOVER = 1e-12;
 /** Rounds in which total amount and final composition must agree; three or four are usual. */
 const MAXIMUM_ROUNDS = 40;
 
@@ -50,18 +57,22 @@ const MAXIMUM_ROUNDS = 40;
  */
 export function solveAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<FillAmounts, AmountProblem> {
   const { fillPressure, fillTemperature } = job.order;
-  const residual = residualAmounts(job, model, vessel);
-  if (!residual.ok) return fail({ code: 'state', where: 'residual', reason: residual.reason });
-  const held = totalAmount(residual.value);
+  const conditioned = conditionedResidual(job, model, vessel);
+  if (!conditioned.ok) {
+    const { reason } = conditioned;
+    return fail(reason.code === 'purge-never-ends' ? reason : { code: 'state', where: 'residual', reason });
+  }
+  const { contents: residual, steps } = conditioned.value;
+  const held = totalAmount(residual);
   if (held > 0) {
-    const warm = settle(model, vessel, residual.value, fillTemperature);
+    const warm = settle(model, vessel, residual, fillTemperature);
     if (warm.ok && warm.value.pressure >= fillPressure) {
       return fail({ code: 'fill-pressure-too-low', residualPressure: warm.value.pressure });
     }
   }
-  const met = meetOrder(job, model, vessel, residual.value);
-  if (met.ok) return ok({ ...met.value, residual: residual.value, total: mole(totalAmount(met.value.finished)) });
-  return fail(met.reason.code === 'missed' ? explainMiss(job, model, vessel, residual.value, met.reason) : met.reason);
+  const met = meetOrder(job, model, vessel, residual);
+  if (met.ok) return ok({ ...met.value, residual, conditioned: steps, total: mole(totalAmount(met.value.finished)) });
+  return fail(met.reason.code === 'missed' ? explainMiss(job, model, vessel, residual, met.reason) : met.reason);
 }
 
 /** What the fill comes to where it misses the order, mol. */
@@ -103,6 +114,14 @@ function residualAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<
   const { contents } = job.cylinder;
   if (!(contents.pressure > 0)) return ok(new Float64Array(job.gases.length));
   return amountsAt(model, vessel, contents.pressure, contents.temperature, contents.fractions);
+}
+
+/** The same after its conditioning. */
+function conditionedResidual(job: Job, model: ThermoModel, vessel: Vessel): Outcome<Conditioned, ConditioningProblem> {
+  const found = residualAmounts(job, model, vessel);
+  return found.ok
+    ? conditionCylinder(model, vessel, job.conditioning, job.parents, found.value, job.cylinder.contents.temperature)
+    : found;
 }
 
 function amountsAt(
@@ -161,7 +180,7 @@ function balanceEquations(job: Job, residual: Float64Array, total: number): Bala
 function chooseParents(job: Job, { a, b }: Balance): number[] {
   const unordered = job.parents.map((parent) => PURITY_WEIGHT * unorderedShare(job, parent.fractions));
   const preferred = nonNegativeLeastSquares([...a, unordered], [...b, 0]);
-  return job.parents.map((_, s) => s).filter((s) => preferred[s]! > 0);
+  return job.parents.map((_, s) => s).filter((s) => preferred[s]! > LEFTOVER);
 }
 
 /** mol from each parent; only those in `used` are drawn from. */
@@ -204,7 +223,7 @@ function explainMiss(
 }
 
 /** A source that holds less than this part of the ordered fraction is a trace, not a source. */
-const SOURCE = 0.1;
+export const SOURCE = 0.1;
 
 /** Ordered gases that nothing supplies; a trace as an impurity does not count. */
 function gasesBeyondReach(job: Job, residual: Float64Array): number[] {

@@ -7,6 +7,7 @@ import type { Vessel } from '../steps/cylinder.ts';
 import { airDensity, balanceReading } from '../steps/weighing.ts';
 import { chooseGauge } from '../steps/gauge.ts';
 import type { FillAmounts } from './amounts.ts';
+import type { Arrangement } from './arrangement.ts';
 import type { CylinderState, PlanStep, StepWeighing, StripPoint } from './plan.ts';
 
 /** Gas temperatures of the strip on the fill sheet, °C: a bench between a cold morning and a hot afternoon. */
@@ -34,10 +35,10 @@ export interface StateProblem {
  * Walks through the additions in order and settles the cylinder after each at
  * that step's gas temperature: pₖ V(pₖ, Tₖ) = Nₖ Z(xₖ, pₖ, Tₖ) R Tₖ.
  *
- * `order` holds indexes into `Job.parents`; `molarMasses` is aligned with `Job.gases`, kg/mol.
+ * `molarMasses` is aligned with `Job.gases`, kg/mol.
  */
 export function fillStates(
-  job: Job, model: ThermoModel, vessel: Vessel, amounts: FillAmounts, order: readonly number[],
+  job: Job, model: ThermoModel, vessel: Vessel, amounts: FillAmounts, order: Arrangement,
   molarMasses: Float64Array,
 ): Outcome<FillStates, StateProblem> {
   const { contents } = job.cylinder;
@@ -49,9 +50,9 @@ export function fillStates(
   let held: Float64Array = Float64Array.from(amounts.residual);
   let before: CylinderState | null = start?.value ?? null;
   const scale = weighingScale(job, vessel, massOf(held, molarMasses), before);
-  for (const index of order) {
+  for (const { parent: index, share } of order) {
     const parent = job.parents[index]!;
-    const amount = amounts.additions[index]!;
+    const amount = share * amounts.additions[index]!;
     held = held.map((value, i) => value + amount * parent.fractions[i]!);
     const stuck = { code: 'step-state', step: steps.length + 1, temperature: parent.gasTemperature, amounts: held } as const;
     const state = settle(model, vessel, held, parent.gasTemperature);
@@ -59,6 +60,7 @@ export function fillStates(
     steps.push({
       number: steps.length + 1,
       parent: parent.key,
+      share,
       amount: mole(amount),
       mass: kilogram(amount * massOf(parent.fractions, molarMasses)),
       state: state.value,

@@ -5,6 +5,7 @@ import type { Job } from '../recipe/job.ts';
 import { amountToReach, settle, totalAmount } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
 import { solveAmounts } from './amounts.ts';
+import type { Arrangement } from './arrangement.ts';
 
 /** What Dalton's law would have had the technician read, step by step. */
 export interface IdealComparison {
@@ -20,16 +21,16 @@ export interface IdealComparison {
  * the `residual` that is really there (mol, aligned with `Job.gases`).
  */
 export function compareWithIdealGas(
-  job: Job, ideal: ThermoModel, real: ThermoModel, vessel: Vessel, residual: Float64Array, order: readonly number[],
+  job: Job, ideal: ThermoModel, real: ThermoModel, vessel: Vessel, residual: Float64Array, order: Arrangement,
 ): Outcome<IdealComparison, { readonly code: 'ideal-not-planned' } | ThermoReason> {
   const plain: Vessel = { ...vessel, cylinder: { ...job.cylinder, pressureExpansion: 0, thermalExpansion: 0 } };
   const amounts = solveAmounts({ ...job, cylinder: plain.cylinder }, ideal, plain);
   if (!amounts.ok) return { ok: false, reason: { code: 'ideal-not-planned' } };
   const stops: Pascal[] = [];
   let held: Float64Array = Float64Array.from(amounts.value.residual);
-  for (const index of order) {
+  for (const { parent: index, share } of order) {
     const parent = job.parents[index]!;
-    held = held.map((value, i) => value + amounts.value.additions[index]! * parent.fractions[i]!);
+    held = held.map((value, i) => value + share * amounts.value.additions[index]! * parent.fractions[i]!);
     const state = settle(ideal, plain, held, parent.gasTemperature);
     if (!state.ok) return state;
     stops.push(pascal(state.value.pressure));
@@ -39,10 +40,10 @@ export function compareWithIdealGas(
 
 /** Composition after filling each parent in turn to its stop; null when the real gas cannot be followed there. */
 function followStops(
-  job: Job, real: ThermoModel, vessel: Vessel, residual: Float64Array, order: readonly number[], stops: readonly Pascal[],
+  job: Job, real: ThermoModel, vessel: Vessel, residual: Float64Array, order: Arrangement, stops: readonly Pascal[],
 ): Float64Array | null {
   let held: Float64Array = Float64Array.from(residual);
-  for (const [position, index] of order.entries()) {
+  for (const [position, { parent: index }] of order.entries()) {
     const parent = job.parents[index]!;
     const amount = amountToReach(real, vessel, held, parent.fractions, stops[position]!, parent.gasTemperature);
     if (!amount.ok) return null;

@@ -2,7 +2,7 @@ import { fail, ok, pascal } from '../../units/index.ts';
 import type { Kelvin, Outcome, Pascal } from '../../units/index.ts';
 import { boundDioxide, gasRecord, idealModel, realModel } from '../../thermo/index.ts';
 import type { GasId, ModelSource, ThermoModel, ThermoReason } from '../../thermo/index.ts';
-import type { Recipe } from '../recipe/document.ts';
+import type { Recipe, Sequence } from '../recipe/document.ts';
 import type { Job } from '../recipe/job.ts';
 import { normaliseRecipe } from '../recipe/normalise.ts';
 import type { NearestComposition, RecipeProblem } from '../recipe/problem.ts';
@@ -14,11 +14,13 @@ import { phaseOfPlan } from '../phase/plan-phase.ts';
 import { settle } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
 import { orderedFractions, solveAmounts } from './amounts.ts';
-import type { AmountProblem, NearestBlend } from './amounts.ts';
+import type { AmountProblem, FillAmounts, NearestBlend } from './amounts.ts';
+import type { Arrangement } from './arrangement.ts';
 import { fillStates } from './fill-states.ts';
 import { finalQuantities } from './final.ts';
 import { compareWithIdealGas } from './ideal-comparison.ts';
-import type { CylinderState, Plan, UncheckedPlan } from './plan.ts';
+import { orderSearchFor } from './order-search.ts';
+import type { CylinderState, Plan, PlannedSequence, UncheckedPlan } from './plan.ts';
 import { sequenceOfAdditions } from './sequence.ts';
 
 /** A plan, or everything that stands in its way. */
@@ -28,13 +30,15 @@ export type PlanAnswer = Outcome<Plan, { readonly code: 'not-planned'; readonly 
 export interface PlanOptions {
   /** `gerg2008` uses the gas constant that GERG-2008 was published with, to compare with its tables. */
   readonly gasConstant?: 'codata' | 'gerg2008';
+  /** The best order as found elsewhere for this very recipe; used with the sequence `best`. */
+  readonly arrangement?: Arrangement | undefined;
 }
 
 /**
  * Recipe → plan, the main pipeline; start reading here:
  *
  *     texts ─ normalise ─▶ Job ─ solveAmounts ─▶ mol of each parent
- *       ─ sequence ─▶ order ─ fillStates ─▶ stops, strips, masses
+ *       ─ chooseOrder ─▶ order ─ fillStates ─▶ stops, strips, masses
  *       ─ compareWithIdealGas, finalQuantities, phaseOfPlan, mixingOfFill ─▶ Plan
  *       ─ judgePlan ─▶ findings
  */
@@ -57,7 +61,8 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
 
   const amounts = solveAmounts(job, model, vessel);
   if (!amounts.ok) return notPlanned([amountProblem(job, amounts.reason)]);
-  const order = sequenceOfAdditions(job, amounts.value.additions, sequence);
+  const chosen = chooseOrder(job, model, vessel, amounts.value, sequence, options.arrangement);
+  const order = chosen.arrangement;
   const molarMasses = Float64Array.from(job.gases, (gas) => gasRecord(gas).molarMass.value);
   const states = fillStates(job, model, vessel, amounts.value, order, molarMasses);
   if (!states.ok) {
@@ -76,6 +81,8 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
   if (!trust.ok) return notPlanned([{ code: 'no-state', field: 'order', where: 'finished gas', reason: trust.reason }]);
   const unchecked: UncheckedPlan = {
     job,
+    sequence: chosen.sequence,
+    conditioned: amounts.value.conditioned,
     start: states.value.start,
     steps: states.value.steps.map((step, index) => ({
       ...step,
@@ -96,6 +103,18 @@ export function planJob(job: Job, sequence: Recipe['route']['sequence'], options
     mixing: mixingOfFill(job, model, amounts.value, finished.value),
     findings: judgePlan(unchecked, judgingTools(model, vessel, unchecked)),
   });
+}
+
+/** The order of addition, and how it came about. */
+function chooseOrder(
+  job: Job, model: ThermoModel, vessel: Vessel, amounts: FillAmounts, sequence: Sequence, found: Arrangement | undefined,
+): { readonly arrangement: Arrangement; readonly sequence: PlannedSequence } {
+  if (sequence !== 'best') return { arrangement: sequenceOfAdditions(job, amounts.additions, sequence), sequence };
+  const parents = amounts.additions.filter((amount) => amount > 0).length;
+  const best = found ?? orderSearchFor(parents)?.(job, model, vessel, amounts) ?? null;
+  return best === null
+    ? { arrangement: sequenceOfAdditions(job, amounts.additions, 'smallest first'), sequence: 'not searched yet' }
+    : { arrangement: best, sequence };
 }
 
 function pairedNitrogenDioxide(job: Job, { amounts, temperature, volume }: CylinderState): number | null {
@@ -134,6 +153,8 @@ function amountProblem(job: Job, problem: AmountProblem): RecipeProblem {
         };
     case 'fill-pressure-too-low':
       return { code: problem.code, field: 'order.fillPressure', residualPressure: pascal(problem.residualPressure), barometer };
+    case 'purge-never-ends':
+      return { code: problem.code, field: `conditioning.${String(problem.step)}.wanted`, cycles: problem.cycles, oldGas: problem.oldGas };
     case 'residual-in-the-way':
       return { code: problem.code, field: 'cylinder.contents', gases: problem.gases.map((gas) => job.gases[gas]!), ventTo: problem.ventTo, barometer };
     default:

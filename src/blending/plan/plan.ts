@@ -3,7 +3,9 @@ import type {
 } from '../../units/index.ts';
 import type { GasId, ModelClass, RangeVerdict } from '../../thermo/index.ts';
 import type { Finding } from '../hazards/finding.ts';
+import type { Sequence } from '../recipe/document.ts';
 import type { Job } from '../recipe/job.ts';
+import type { ConditionedStep } from '../steps/conditioning.ts';
 import type { MixingResult } from '../mixing/mixing.ts';
 import type { PlanPhase } from '../phase/plan-phase.ts';
 
@@ -35,6 +37,8 @@ export interface PlanStep {
   readonly number: number;
   /** `JobParent.key`. */
   readonly parent: string;
+  /** Share of the parent's whole amount that this addition is; 1 unless it is split. */
+  readonly share: number;
   readonly amount: Mole;
   readonly mass: Kilogram;
   /** The cylinder after this addition, settled at this step's gas temperature. */
@@ -91,9 +95,19 @@ export interface FinalQuantities {
   readonly releasedVolume: CubicMetre;
 }
 
+/**
+ * How the order of addition came about. `not searched yet`: the best order was
+ * asked for and has not been found yet; the smallest addition goes first until then.
+ */
+export type PlannedSequence = Sequence | 'not searched yet';
+
 /** The plan before it is judged: what the hazard rules look at. */
 export interface UncheckedPlan {
   readonly job: Job;
+  /** How the order of addition came about. */
+  readonly sequence: PlannedSequence;
+  /** What the conditioning did before the first addition, act by act. */
+  readonly conditioned: readonly ConditionedStep[];
   /** Before the first addition; null for a perfect vacuum. */
   readonly start: CylinderState | null;
   readonly steps: readonly PlanStep[];

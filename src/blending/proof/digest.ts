@@ -14,7 +14,7 @@ export async function dataDigest(groups: readonly ProofGroup[]): Promise<string>
     id, why, cases: cases.map(({ id: caseId, title, source, trust, published, unit, tolerance, remark }) => (
       { id: caseId, title, source, trust, published, unit, tolerance, remark })),
   }));
-  return checksum(canonicalJson(textsOnly({ coefficients: await publishedData(), hazards: gasIds.map(gasFacts), statements })));
+  return checksum(canonicalJson(textsOnly({ coefficients: await publishedData(), hazards: gasIds.map((gas) => gasFacts(gas)), statements })));
 }
 
 /** Numbers as the shortest text that reads back as the same number, so that the canonical form is one of texts. */

@@ -1,6 +1,6 @@
 /** Recipes of the worked examples: a rigid 10 L cylinder, one pure parent for each gas, in the order listed. */
 import type { Contents, Recipe } from '../recipe/document.ts';
-import { defaultContents, defaultCylinder, emptyRecipe } from '../recipe/defaults.ts';
+import { defaultContents, defaultCylinder, defaultRoute, emptyRecipe, parentNamed, purityTable } from '../recipe/defaults.ts';
 import { planRecipe } from '../plan/plan-recipe.ts';
 import type { PlanAnswer } from '../plan/plan-recipe.ts';
 
@@ -33,11 +33,9 @@ function recipeOfExample({ order, to, temperature = '20 °C', at = {}, left }: F
       ...defaultCylinder, material: 'rigid', waterCapacity: '10 L',
       contents: { ...defaultContents, ...(left === undefined ? { state: 'evacuated' } : { state: 'residual', ...left }) },
     },
-    parents: order.map(([gas]) => ({
-      key: gas, name: gas, composition: [{ gas, amount: '100 %' }], pressure: { typed: '', reference: 'absolute' },
-    })),
+    parents: order.map(([gas]) => parentNamed(gas, gas, { composition: purityTable([{ gas, amount: '100 %' }]) })),
     route: {
-      by: 'pressure and mass', sequence: 'as listed',
+      ...defaultRoute, by: 'pressure and mass', sequence: 'as listed',
       steps: Object.entries(at).map(([parent, gasTemperature]) => ({ parent, gasTemperature, gauge: '' })),
     },
   };

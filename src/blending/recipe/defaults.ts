@@ -1,4 +1,6 @@
-import type { Conditions, Contents, Cylinder, PressureText, Recipe, Route } from './document.ts';
+import type {
+  Batch, CompositionLine, Conditions, Contents, Cylinder, Parent, PressureText, PurityLine, Recipe, Route, Split,
+} from './document.ts';
 
 /** A pressure that was not stated. */
 export const unstatedPressure: PressureText = { typed: '', reference: 'gauge' };
@@ -18,9 +20,41 @@ export const defaultConditions: Conditions = {
   concentrationPressure: { typed: '101.325 kPa', reference: 'absolute' },
   standardPressure: '1 bar',
   balanceResolution: '0.1 g',
+  balance: '',
+  thermometer: '',
 };
 
-export const defaultRoute: Route = { by: 'pressure', sequence: 'smallest first', steps: [] };
+/** Every parent goes in whole. */
+export const noSplit: Split = { parent: '', share: '50 %', before: '' };
+
+export const defaultRoute: Route = { by: 'pressure', sequence: 'smallest first', split: noSplit, steps: [] };
+
+/** One cylinder, without a booster. */
+export const defaultBatch: Batch = { cylinders: '1', together: false, boosterInlet: unstatedPressure };
+
+/** A parent of which nothing is known but what `parentNamed` is told. */
+const unknownParent: Omit<Parent, 'key' | 'name'> = {
+  composition: [],
+  pressure: unstatedPressure,
+  temperature: '',
+  waterCapacity: '',
+  filling: 'gas',
+  contentMass: '',
+  lot: '',
+  expiry: '',
+  location: '',
+  stock: '',
+};
+
+/** A purity table from bare lines: certified, without uncertainties. */
+export function purityTable(lines: readonly CompositionLine[]): readonly PurityLine[] {
+  return lines.map(({ gas, amount }) => ({ gas, amount, uncertainty: '', basis: 'certified' }));
+}
+
+/** A parent with what is said of it, and everything else not stated. */
+export function parentNamed(key: string, name: string, said: Partial<Omit<Parent, 'key' | 'name'>> = {}): Parent {
+  return { ...unknownParent, ...said, key, name };
+}
 
 /** Nothing is said about the contents: the plan is held until somebody does. */
 export const defaultContents: Contents = {
@@ -40,6 +74,10 @@ export const defaultCylinder: Cylinder = {
   pressureExpansion: '',
   thermalExpansion: '',
   startReading: '',
+  testDue: '',
+  valveOutlet: '',
+  held: '',
+  conditionedFor: '',
   contents: defaultContents,
 };
 
@@ -51,7 +89,10 @@ export const emptyRecipe: Recipe = {
   cylinder: defaultCylinder,
   parents: [],
   gauges: [],
+  conditioning: [],
   route: defaultRoute,
+  batch: defaultBatch,
   conditions: defaultConditions,
+  values: [],
   overrides: [],
 };

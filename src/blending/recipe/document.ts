@@ -22,6 +22,16 @@ export interface CompositionLine {
   readonly amount: string;
 }
 
+/** Whether a purity figure was measured on this very cylinder or is usual for the grade. */
+export type PurityBasis = 'certified' | 'typical';
+
+/** One line of a parent's purity table. */
+export interface PurityLine extends CompositionLine {
+  /** Expanded uncertainty (k = 2) of the amount, `1 %` of it or `0.5 µmol/mol`; empty: not stated. */
+  readonly uncertainty: string;
+  readonly basis: PurityBasis;
+}
+
 /** One ordered component. */
 export interface OrderLine extends CompositionLine {
   /** Preparation tolerance relative to the nominal amount, `2 %`; empty: none stated. */
@@ -61,17 +71,41 @@ export interface Cylinder {
   readonly thermalExpansion: string;
   /** Balance reading before the first addition; empty: only the gains are planned. */
   readonly startReading: string;
+  /** Date by which it must be tested again, `2027-03-31`; empty: not stated. */
+  readonly testDue: string;
+  /** As written on the cylinder; free text. */
+  readonly valveOutlet: string;
+  /** Gases it has held since it was last cleaned, as typed: `CO, CO₂, N₂`. */
+  readonly held: string;
+  /** What its inside was prepared for; free text. */
+  readonly conditionedFor: string;
   readonly contents: Contents;
 }
+
+/** How much gas a parent's cylinder holds: known by its pressure, or by the mass of its liquid. */
+export type ParentFilling = 'gas' | 'liquefied';
 
 /** A parent gas, pure or premix. Its composition has at most one `balance` line. */
 export interface Parent {
   /** Stable within the recipe, e.g. `p1`. */
   readonly key: string;
   readonly name: string;
-  readonly composition: readonly CompositionLine[];
+  readonly composition: readonly PurityLine[];
   /** Supply pressure; typed may be empty: not stated. */
   readonly pressure: PressureText;
+  /** Gas temperature at which that pressure was read; empty: the room's. */
+  readonly temperature: string;
+  /** Water capacity of the parent's cylinder; empty: not stated. */
+  readonly waterCapacity: string;
+  readonly filling: ParentFilling;
+  /** Mass of gas left in a liquefied parent, `12 kg`; empty: not stated. */
+  readonly contentMass: string;
+  readonly lot: string;
+  /** Last day on which it may be used, `2027-06-30`; empty: not stated. */
+  readonly expiry: string;
+  readonly location: string;
+  /** Key of the stock entry that it was copied from; empty: typed here. */
+  readonly stock: string;
 }
 
 export interface Gauge {
@@ -82,14 +116,29 @@ export interface Gauge {
   readonly reference: PressureReference;
   /** Upper end of the scale in its own unit and reference. */
   readonly fullScale: string;
-  /** Accuracy as percent of span, `0.25 %`. */
+  /** Half-width as percent, `0.25 %`. */
   readonly accuracy: string;
+  /** What that percentage is of. */
+  readonly accuracyOf: 'span' | 'reading';
   /** Smallest step that can be read, in its own unit. */
   readonly resolution: string;
+  /** Date of its last calibration, `2026-05-11`; empty: not stated. */
+  readonly calibrated: string;
 }
 
 export type FillBy = 'pressure' | 'mass' | 'pressure and mass';
-export type Sequence = 'smallest first' | 'as listed';
+/** `best`: the order that the checks like best, splitting the balance gas where that helps. */
+export type Sequence = 'best' | 'smallest first' | 'as listed';
+
+/** A parent added in two parts: a share of its amount early, the rest at its place. Used with `as listed`. */
+export interface Split {
+  /** Key of the parent; empty: none is split. */
+  readonly parent: string;
+  /** Share of its amount that goes in early, `50 %`. */
+  readonly share: string;
+  /** Key of the parent before which the early part goes in; empty: first of all. */
+  readonly before: string;
+}
 
 /** What may be said about one addition; empty texts mean the default. */
 export interface StepChoice {
@@ -103,7 +152,49 @@ export interface StepChoice {
 export interface Route {
   readonly by: FillBy;
   readonly sequence: Sequence;
+  readonly split: Split;
   readonly steps: readonly StepChoice[];
+}
+
+/** One act on the cylinder before the first addition. */
+export type ConditioningStep =
+  /** Let gas out, or pump, down to a pressure. */
+  | { readonly kind: 'lower'; readonly to: PressureText }
+  /**
+   * Fill with the purge gas up to `high` and let out or pump down to `low`, again and again.
+   * `cycles` empty: as many as bring the old gas down to `wanted`.
+   */
+  | {
+      readonly kind: 'purge';
+      /** Key of the parent that purges. */
+      readonly parent: string;
+      readonly low: PressureText;
+      readonly high: PressureText;
+      readonly cycles: string;
+      /** Largest fraction of the old gas that may be left, `1 µmol/mol`; empty: not asked. */
+      readonly wanted: string;
+    }
+  /** Bake, passivation, hold and the like: words for the sheet, nothing is computed. */
+  | { readonly kind: 'free'; readonly text: string };
+
+/** Several identical cylinders from the same parents. */
+export interface Batch {
+  /** How many, `1`. */
+  readonly cylinders: string;
+  /** On one manifold and filled at once, or one after another. */
+  readonly together: boolean;
+  /** Lowest pressure a booster still draws from; empty: there is no booster. */
+  readonly boosterInlet: PressureText;
+}
+
+/** The laboratory's own figure in place of a published one, copied here so that the recipe judges alike anywhere. */
+export interface LaboratoryValue {
+  /** `PublishedValue.id` that it replaces. */
+  readonly id: string;
+  /** A number in the unit of the published value. */
+  readonly value: string;
+  readonly source: string;
+  readonly date: string;
 }
 
 export type StandardPressure = '1 bar' | '1 atm';
@@ -120,6 +211,10 @@ export interface Conditions {
   readonly standardPressure: StandardPressure;
   /** Smallest step the balance shows. */
   readonly balanceResolution: string;
+  /** Which balance, and when it was calibrated: words for the sheet. */
+  readonly balance: string;
+  /** Which thermometer, and when it was calibrated: words for the sheet. */
+  readonly thermometer: string;
 }
 
 /** A named person's decision to go on in spite of one hold. */
@@ -140,7 +235,10 @@ export interface Recipe {
   /** In the technician's own order; the plan follows it when the sequence is `as listed`. */
   readonly parents: readonly Parent[];
   readonly gauges: readonly Gauge[];
+  readonly conditioning: readonly ConditioningStep[];
   readonly route: Route;
+  readonly batch: Batch;
   readonly conditions: Conditions;
+  readonly values: readonly LaboratoryValue[];
   readonly overrides: readonly Override[];
 }

@@ -24,9 +24,11 @@ export function readGauge(reader: FieldReader, text: Gauge): JobGauge {
   if (!step.ok) reader.problems.push({ code: 'entry', field: `${field}.resolution`, problem: step.reason });
   const resolution = step.ok ? step.value.difference : 1;
   reader.positive(`${field}.resolution`, resolution);
+  const accuracy = reader.read(`${field}.accuracy`, parseRelative(text.accuracy), 0);
   return {
     key: text.key, name: text.name, unit, reference: text.reference, fullScale, span,
-    accuracy: reader.read(`${field}.accuracy`, parseRelative(text.accuracy), 0) * span,
+    accuracy: text.accuracyOf === 'span' ? accuracy * span : 0,
+    accuracyOfReading: text.accuracyOf === 'reading' ? accuracy : 0,
     resolution,
   };
 }

@@ -1,6 +1,7 @@
 import type { CubicMetre, Fraction, PressureUnit, Kelvin, Kilogram, Pascal } from '../../units/index.ts';
 import type { GasId } from '../../thermo/index.ts';
-import type { CylinderMaterial, FillBy, Override, PressureReference, StandardPressure } from './document.ts';
+import type { LaboratoryValues } from '../values/value.ts';
+import type { CylinderMaterial, FillBy, Override, ParentFilling, PressureReference, StandardPressure } from './document.ts';
 
 /**
  * The recipe as checked SI numbers. Whatever is wrong with the text has been
@@ -15,9 +16,49 @@ export interface Job {
   readonly cylinder: JobCylinder;
   readonly parents: readonly JobParent[];
   readonly gauges: readonly JobGauge[];
+  /** What is done to the cylinder before the first addition. */
+  readonly conditioning: readonly JobConditioning[];
   readonly by: FillBy;
+  /** A parent added in two parts, used with `as listed`; null: all go in whole. */
+  readonly split: JobSplit | null;
+  readonly batch: JobBatch;
   readonly conditions: JobConditions;
   readonly overrides: readonly Override[];
+  /** The laboratory's own figures in place of published ones. */
+  readonly values: LaboratoryValues;
+}
+
+/** `ConditioningStep` in SI; pressures absolute. */
+export type JobConditioning =
+  | { readonly kind: 'lower'; readonly to: Pascal }
+  | {
+      readonly kind: 'purge';
+      /** Index into `Job.parents`. */
+      readonly parent: number;
+      readonly low: Pascal;
+      readonly high: Pascal;
+      /** null: as many as `wanted` takes. */
+      readonly cycles: number | null;
+      /** Largest fraction of the old gas left; null: not asked. */
+      readonly wanted: number | null;
+    }
+  | { readonly kind: 'free'; readonly text: string };
+
+export interface JobSplit {
+  /** Index into `Job.parents`. */
+  readonly parent: number;
+  /** Share of its amount that goes in early, between 0 and 1. */
+  readonly share: number;
+  /** Index of the parent before which it goes in; null: first of all. */
+  readonly before: number | null;
+}
+
+export interface JobBatch {
+  /** How many identical cylinders, at least 1. */
+  readonly cylinders: number;
+  readonly together: boolean;
+  /** Lowest absolute pressure a booster draws from; null: there is no booster. */
+  readonly boosterInlet: Pascal | null;
 }
 
 export interface JobComponent {
@@ -76,6 +117,13 @@ export interface JobParent {
   readonly purityStated: boolean;
   /** Absolute supply pressure; null: not stated. */
   readonly pressure: Pascal | null;
+  /** Gas temperature of that pressure. */
+  readonly temperature: Kelvin;
+  /** Of its cylinder; null: not stated. */
+  readonly waterCapacity: CubicMetre | null;
+  readonly filling: ParentFilling;
+  /** Gas left in a liquefied parent, kg; null: not stated. */
+  readonly contentMass: Kilogram | null;
   /** Gas temperature at which the stop after this addition is read. */
   readonly gasTemperature: Kelvin;
   /** Key of the gauge asked for; null: choose. */
@@ -91,8 +139,10 @@ export interface JobGauge {
   readonly fullScale: Pascal;
   /** Span of the scale, a pressure difference in Pa. */
   readonly span: number;
-  /** Half-width of the stated accuracy, Pa. */
+  /** Half-width of the stated accuracy, Pa; 0 when it is a share of the reading. */
   readonly accuracy: number;
+  /** Half-width as a share of the reading (fraction); 0 when it is a share of the span. */
+  readonly accuracyOfReading: number;
   /** Smallest readable step, Pa. */
   readonly resolution: number;
 }

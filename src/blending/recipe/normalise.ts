@@ -5,13 +5,17 @@ import {
 import type { Outcome } from '../../units/index.ts';
 import type { GasId } from '../../thermo/index.ts';
 import type { Recipe } from './document.ts';
-import type { Job, JobComponent, JobContents, JobCylinder, JobParent } from './job.ts';
+import type { Job, JobComponent, JobContents, JobCylinder } from './job.ts';
+import { fractionsOf, readParent } from './parent.ts';
 import { readConditions, readGauge, STAND_IN_TEMPERATURE } from './instruments.ts';
 import { MATERIAL_EXPANSION, REFERENCE_TEMPERATURE } from './material.ts';
 import { readComposition } from './composition.ts';
+import { readConditioning } from './conditioning.ts';
 import type { ReadComposition } from './composition.ts';
 import type { RecipeProblem } from './problem.ts';
 import { FieldReader } from './reader.ts';
+import { readBatch, readSplit } from './route.ts';
+import { readLaboratoryValues } from './laboratory-values.ts';
 
 /** One atmosphere, used only while the barometer's own text cannot be read. */
 const STANDARD_ATMOSPHERE = pascal(101_325);
@@ -59,11 +63,15 @@ export function normaliseRecipe(recipe: Recipe): Outcome<Job, RecipeProblems> {
     gases,
     order: { components: components(reader, recipe, ordered, gases), fillPressure, fillTemperature },
     cylinder: cylinder(reader, recipe, left, gases),
-    parents: parents(reader, recipe, supplies, gases, fillTemperature),
+    parents: recipe.parents.map((parent, index) => readParent(reader, recipe, parent, supplies[index]!, gases, fillTemperature)),
     gauges: recipe.gauges.map((gauge) => readGauge(reader, gauge)),
+    conditioning: readConditioning(reader, recipe.conditioning, recipe.parents),
     by: recipe.route.by,
+    split: readSplit(reader, recipe),
+    batch: readBatch(reader, recipe.batch),
     conditions: readConditions(reader, recipe.conditions),
     overrides: recipe.overrides,
+    values: readLaboratoryValues(reader, recipe.values),
   };
   return reader.problems.length === 0 ? ok(job) : fail({ code: 'recipe-problems', problems: reader.problems });
 }
@@ -76,12 +84,6 @@ function noteRepeatedKeys(reader: FieldReader, field: string, keys: readonly str
 /** Every gas that occurs, ordered components first, each once. */
 function gatherGases(compositions: readonly ReadComposition[]): GasId[] {
   return [...new Set(compositions.flatMap(({ parts }) => parts.map((part) => part.gas)))];
-}
-
-function fractionsOf(composition: ReadComposition, gases: readonly GasId[]): Float64Array {
-  const fractions = new Float64Array(gases.length);
-  for (const part of composition.parts) fractions[gases.indexOf(part.gas)]! += part.fraction;
-  return fractions;
 }
 
 function components(reader: FieldReader, recipe: Recipe, ordered: ReadComposition, gases: readonly GasId[]): JobComponent[] {
@@ -144,25 +146,4 @@ function contents(reader: FieldReader, recipe: Recipe, left: ReadComposition, ga
 function balanceGas(recipe: Recipe, reader: FieldReader): GasId | null {
   const silent = new FieldReader(reader.barometer);
   return readComposition(silent, '', recipe.order.components, false).parts.find((part) => part.isBalance)?.gas ?? null;
-}
-
-function parents(
-  reader: FieldReader, recipe: Recipe, supplies: readonly ReadComposition[], gases: readonly GasId[], fillTemperature: Job['order']['fillTemperature'],
-): JobParent[] {
-  return recipe.parents.map((parent, index) => {
-    const supply = supplies[index]!;
-    const choice = recipe.route.steps.find((step) => step.parent === parent.key);
-    if (parent.composition.length === 0) reader.problems.push({ code: 'no-components', field: `parents.${parent.key}.composition` });
-    return {
-      key: parent.key,
-      name: parent.name,
-      fractions: fractionsOf(supply, gases),
-      belowLimit: supply.parts.filter((part) => part.isLimit).map((part) => gases.indexOf(part.gas)),
-      purityStated: parent.composition.length > 1,
-      pressure: reader.optionalPressure(`parents.${parent.key}.pressure`, parent.pressure),
-      gasTemperature:
-        reader.optional(`route.steps.${parent.key}.gasTemperature`, choice?.gasTemperature ?? '', parseTemperature) ?? fillTemperature,
-      gauge: choice === undefined || choice.gauge === '' ? null : choice.gauge,
-    };
-  });
 }

@@ -28,6 +28,18 @@ export type RecipeProblem =
   /** No weather and no laboratory has such an air pressure; a slip of the unit does. Bounds absolute. */
   | { readonly code: 'barometer-unlikely'; readonly field: FieldPath; readonly lowest: Pascal; readonly highest: Pascal }
   | { readonly code: 'no-parents'; readonly field: FieldPath }
+  /** An own value of the laboratory without its source or its date. */
+  | { readonly code: 'origin-missing'; readonly field: FieldPath }
+  /** More than a number stands where the unit is that of the published value. */
+  | { readonly code: 'number-alone'; readonly field: FieldPath; readonly text: string }
+  | { readonly code: 'value-beyond'; readonly field: FieldPath; readonly lowest: number; readonly highest: number }
+  | { readonly code: 'not-a-count'; readonly field: FieldPath; readonly text: string; readonly most: number }
+  | { readonly code: 'share-outside'; readonly field: FieldPath }
+  | { readonly code: 'purge-not-above'; readonly field: FieldPath }
+  | { readonly code: 'purge-without-parent'; readonly field: FieldPath }
+  | { readonly code: 'purge-without-end'; readonly field: FieldPath }
+  /** The purge leaves `oldGas` of the old gas after `cycles` and does not get down to what is wanted. */
+  | { readonly code: 'purge-never-ends'; readonly field: FieldPath; readonly cycles: number; readonly oldGas: number }
   | { readonly code: 'key-repeated'; readonly field: FieldPath; readonly key: string }
   | { readonly code: 'component-without-parent'; readonly field: FieldPath; readonly gases: readonly GasId[]; readonly nearest: NearestComposition }
   | { readonly code: 'cannot-be-made'; readonly field: FieldPath; readonly gases: readonly GasId[]; readonly nearest: NearestComposition }

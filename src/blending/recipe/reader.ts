@@ -46,6 +46,14 @@ export class FieldReader {
     return text.typed.trim() === '' ? null : this.pressure(field, text, this.barometer);
   }
 
+  /** A whole number from 1 to `most`; anything else is noted as `not-a-count`, with 1 in its place. */
+  count(field: FieldPath, text: string, most: number): number {
+    const number = /^\d+$/.test(text.trim()) ? Number(text) : 0;
+    if (number >= 1 && number <= most) return number;
+    this.problems.push({ code: 'not-a-count', field, text, most });
+    return 1;
+  }
+
   /** The gas a text names; null when none, with the problem noted. */
   gas(field: FieldPath, text: string): GasId | null {
     if (text.trim() === '') {

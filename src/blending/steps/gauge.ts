@@ -9,7 +9,12 @@ import type { JobGauge } from '../recipe/job.ts';
 export function chooseGauge(gauges: readonly JobGauge[], asked: string | null, stop: Pascal): JobGauge | null {
   const fitting = gauges.filter((gauge) => gauge.fullScale >= stop && (asked === null || gauge.key === asked));
   return fitting.reduce<JobGauge | null>(
-    (best, gauge) => (best === null || gauge.accuracy < best.accuracy ? gauge : best),
+    (best, gauge) => (best === null || accuracyAt(gauge, stop) < accuracyAt(best, stop) ? gauge : best),
     null,
   );
+}
+
+/** Half-width of a gauge's accuracy at a reading (absolute pressure), Pa. */
+export function accuracyAt(gauge: JobGauge, pressure: Pascal): number {
+  return gauge.accuracy + gauge.accuracyOfReading * Math.max(0, pressure - (gauge.fullScale - gauge.span));
 }

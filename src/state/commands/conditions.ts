@@ -10,6 +10,8 @@ const conditionsWords = {
   concentrationTemperature: 'concentration temperature',
   concentrationPressure: 'concentration pressure',
   standardPressure: 'standard pressure',
+  balance: 'balance',
+  thermometer: 'thermometer',
   balanceResolution: 'balance resolution',
 };
 

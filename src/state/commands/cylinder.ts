@@ -11,6 +11,10 @@ const cylinderWords = {
   pressureExpansion: 'expansion with pressure',
   thermalExpansion: 'expansion with temperature',
   startReading: 'start reading',
+  testDue: 'next test',
+  valveOutlet: 'valve outlet',
+  held: 'gases held',
+  conditionedFor: 'conditioning',
   contents: 'cylinder contents',
 };
 const contentsWords = {

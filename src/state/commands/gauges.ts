@@ -7,15 +7,20 @@ const gaugeWords = {
   reference: 'gauge or absolute',
   fullScale: 'full scale',
   accuracy: 'accuracy',
+  accuracyOf: 'accuracy of span or reading',
   resolution: 'resolution',
+  calibrated: 'calibration date',
 };
 
+/** A gauge without its key; accuracy is of the span and the calibration not stated unless said. */
+export type NewGauge = Omit<Gauge, 'key' | 'accuracyOf' | 'calibrated'> & Partial<Gauge>;
+
 /** Adds a pressure gauge at the end under a fresh key. */
-export function addGauge(gauge: Omit<Gauge, 'key'>): Command {
+export function addGauge(gauge: NewGauge): Command {
   return {
     label: () => 'added gauge',
     merge: null,
-    apply: (recipe) => ({ ...recipe, gauges: [...recipe.gauges, { key: freshKey(recipe.gauges, 'g'), ...gauge }] }),
+    apply: (recipe) => ({ ...recipe, gauges: [...recipe.gauges, { accuracyOf: 'span', calibrated: '', ...gauge, key: freshKey(recipe.gauges, 'g') }] }),
   };
 }
 

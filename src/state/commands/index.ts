@@ -7,3 +7,6 @@ export * from './order.ts';
 export * from './overrides.ts';
 export * from './parents.ts';
 export * from './route.ts';
+export * from './conditioning.ts';
+export * from './values.ts';
+export * from './stock.ts';

@@ -1,16 +1,28 @@
-import type { Parent, Recipe } from '../../blending/index.ts';
+import { noSplit, parentNamed, type Parent, type Recipe, type Split } from '../../blending/index.ts';
 import { freshKey, patchKey, patchWords, replaceKeyed, type Command } from '../command.ts';
 
-const parentWords = { name: 'name', composition: 'composition', pressure: 'supply pressure' };
+const parentWords = {
+  name: 'name',
+  composition: 'composition',
+  pressure: 'supply pressure',
+  temperature: 'supply temperature',
+  waterCapacity: 'water capacity',
+  filling: 'filling',
+  contentMass: 'content',
+  lot: 'lot',
+  expiry: 'expiry',
+  location: 'location',
+  stock: 'stock entry',
+};
 
-/** Adds a parent gas at the end under a fresh key. */
-export function addParent(parent: Omit<Parent, 'key'>): Command {
+/** Adds a parent gas at the end under a fresh key; what is left out is not stated. */
+export function addParent({ name, ...said }: Pick<Parent, 'name'> & Partial<Omit<Parent, 'key'>>): Command {
   return {
     label: () => 'added parent',
     merge: null,
     apply: (recipe) => ({
       ...recipe,
-      parents: [...recipe.parents, { key: freshKey(recipe.parents, 'p'), ...parent }],
+      parents: [...recipe.parents, parentNamed(freshKey(recipe.parents, 'p'), name, said)],
     }),
   };
 }
@@ -35,9 +47,19 @@ export function removeParent(key: string): Command {
     apply: (recipe) => ({
       ...recipe,
       parents: recipe.parents.filter((parent) => parent.key !== key),
-      route: { ...recipe.route, steps: recipe.route.steps.filter((step) => step.parent !== key) },
+      route: {
+        ...recipe.route,
+        split: withoutParent(recipe.route.split, key),
+        steps: recipe.route.steps.filter((step) => step.parent !== key),
+      },
     }),
   };
+}
+
+/** The split after a parent has gone: none when it was the one split, else its early part goes in first. */
+function withoutParent(split: Split, key: string): Split {
+  if (split.parent === key) return noSplit;
+  return split.before === key ? { ...split, before: '' } : split;
 }
 
 /**

@@ -1,7 +1,7 @@
-import type { Route, StepChoice } from '../../blending/index.ts';
+import type { Route, Split, StepChoice } from '../../blending/index.ts';
 import { patchKey, patchWords, type Command } from '../command.ts';
 
-const routeWords = { by: 'fill by', sequence: 'order of addition', steps: 'steps' };
+const routeWords = { by: 'fill by', sequence: 'order of addition', split: 'split addition', steps: 'steps' };
 const stepWords = { parent: 'step', gasTemperature: 'gas temperature', gauge: 'gauge' };
 
 /** Changes how the fill is measured and in which order parents are added. */
@@ -10,6 +10,22 @@ export function editRoute(patch: Partial<Omit<Route, 'steps'>>): Command {
     label: () => patchWords(patch, routeWords),
     merge: patchKey('route', patch),
     apply: (recipe) => ({ ...recipe, route: { ...recipe.route, ...patch } }),
+  };
+}
+
+/**
+ * Adds the parents in the order of their keys from now on, one of them split or
+ * none. Parents not named keep their places after those that are.
+ */
+export function arrangeParents(keys: readonly string[], split: Split): Command {
+  return {
+    label: () => 'order of addition',
+    merge: null,
+    apply: (recipe) => {
+      const named = keys.flatMap((key) => recipe.parents.filter((parent) => parent.key === key));
+      const others = recipe.parents.filter(({ key }) => !keys.includes(key));
+      return { ...recipe, parents: [...named, ...others], route: { ...recipe.route, sequence: 'as listed', split } };
+    },
   };
 }
 

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { compressibilityCurve, correlatedVapourPressure, knownGases, vapourPressureAt, vapourPressureCurve } from '../../../src/blending/index.ts';
+import { knownGases } from '../../../src/blending/index.ts';
+import { compressibilityCurve, correlatedVapourPressure, vapourPressureAt, vapourPressureCurve } from '../../../src/blending/gases/curves.ts';
 import { kelvin, pascal } from '../../../src/units/index.ts';
 import { valueOf } from '../lab.ts';
 

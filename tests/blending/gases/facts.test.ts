@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { gasCard, gasFacts, knownGases } from '../../../src/blending/index.ts';
+import { knownGases } from '../../../src/blending/index.ts';
+import { gasCard } from '../../../src/blending/gases/card.ts';
+import { gasFacts } from '../../../src/blending/gases/facts.ts';
 import type { GasId } from '../../../src/blending/index.ts';
 
 const figureOf = (gas: GasId, begin: string) => gasFacts(gas).figures.find(({ name }) => name.startsWith(begin));

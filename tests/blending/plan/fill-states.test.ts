@@ -82,7 +82,7 @@ describe('fillStates', () => {
     const masses = Float64Array.from(cold.gases, (gas) => gasRecord(gas).molarMass.value);
     // 2.2 bar of propane at −35 °C, where its vapour pressure is 1.4 bar: not seen by settling alone unless unstable.
     const many = { ...amounts, additions: amounts.additions.map((amount, s) => (s === 0 ? amount * 8 : amount)) };
-    expect(fillStates(cold, model, vessel, many, [0, 1], masses)).toMatchObject({ ok: false, reason: { code: 'step-state', step: 1 } });
+    expect(fillStates(cold, model, vessel, many, [{ parent: 0, share: 1 }, { parent: 1, share: 1 }], masses)).toMatchObject({ ok: false, reason: { code: 'step-state', step: 1 } });
   });
 });
 

@@ -72,7 +72,7 @@ describe('normaliseRecipe', () => {
   });
 
   it('reads gauges: full scale, span and accuracy by their reference', () => {
-    const gauge = { key: 'g', name: 'G', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.25 %', resolution: '0.1' } as const;
+    const gauge = { key: 'g', name: 'G', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.25 %', accuracyOf: 'span', resolution: '0.1', calibrated: '' } as const;
     const withGauges = normaliseRecipe({ ...recipe, gauges: [gauge, { ...gauge, key: 'a', reference: 'absolute', unit: 'mbar', fullScale: '1330 mbar', resolution: '0.1 mbar' }] });
     expect(withGauges).toMatchObject({
       ok: true,

@@ -4,7 +4,7 @@ import type { JobGauge } from '../../../src/blending/index.ts';
 import { pascal } from '../../../src/units/index.ts';
 
 function gauge(key: string, fullScale: number, accuracy: number): JobGauge {
-  return { key, name: key, unit: 'bar', reference: 'absolute', fullScale: pascal(fullScale), span: fullScale, accuracy, resolution: 100 };
+  return { key, name: key, unit: 'bar', reference: 'absolute', fullScale: pascal(fullScale), span: fullScale, accuracy, accuracyOfReading: 0, resolution: 100 };
 }
 
 const coarse = gauge('coarse', 250e5, 62_500);

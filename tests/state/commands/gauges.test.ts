@@ -13,7 +13,7 @@ describe('gauge commands', () => {
   it('add under fresh keys and edit one', () => {
     expect(recipe.gauges.map(({ key }) => key)).toEqual(['g1', 'g2']);
     const command = editGauge('g2', { fullScale: '10' });
-    expect(command.apply(recipe).gauges).toEqual([{ key: 'g1', ...gauge }, { key: 'g2', ...gauge, fullScale: '10' }]);
+    expect(command.apply(recipe).gauges).toMatchObject([{ key: 'g1', ...gauge, accuracyOf: 'span' }, { key: 'g2', ...gauge, fullScale: '10' }]);
     expect(command.label(recipe)).toBe('Panel full scale');
   });
 

@@ -7,7 +7,7 @@ const recipe = addParent({ name: 'Argon', composition: [], pressure: { typed: ''
 describe('route commands', () => {
   it('choose measure and order of addition', () => {
     const command = editRoute({ by: 'mass', sequence: 'as listed' });
-    expect(command.apply(recipe).route).toEqual({ by: 'mass', sequence: 'as listed', steps: [] });
+    expect(command.apply(recipe).route).toEqual({ ...emptyRecipe.route, by: 'mass', sequence: 'as listed' });
     expect(command.label(recipe)).toBe('fill by and order of addition');
   });
 

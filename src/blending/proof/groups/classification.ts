@@ -2,6 +2,7 @@ import { fail, ok } from '../../../units/index.ts';
 import type { ProofCase, ProofGroup } from '../case.ts';
 import { evaluateRatio } from '../../hazards/gas-ratio.ts';
 import { flammability, lowerFlammableLimit, oxidisingPowerRatio } from '../../hazards/iso10156.ts';
+import { publishedOnly } from '../../values/value.ts';
 import { absolute, formulaOf, figure, printed } from '../making.ts';
 
 type Percent = Readonly<Record<string, number>>;
@@ -31,7 +32,7 @@ export function classification(): ProofGroup {
   }));
   cases.push({
     ...common, id: 'classification:H1:limit', title: `H1: ${words(fourGases)}: lower flammable limit`, source: ISO, trust: 'published',
-    published: 39.7, unit: '%', tolerance: printed(1), compute: () => lowerFlammableLimit(Object.keys(fourGases), fractions(fourGases)),
+    published: 39.7, unit: '%', tolerance: printed(1), compute: () => lowerFlammableLimit(Object.keys(fourGases), fractions(fourGases), publishedOnly),
   });
   cases.push({
     ...common, id: 'classification:H9', title: `H9: ${words(harmonised)}: Σ A′/Tci`, source: GHS, trust: 'from memory', published: 1.29,
@@ -47,7 +48,7 @@ export function classification(): ProofGroup {
   cases.push({
     ...common, id: 'classification:H10', title: `H10: ${words(oxidising)}: oxidising power`, source: GHS, trust: 'from memory', published: 20.1, unit: '%', tolerance: printed(1),
     compute: () => {
-      const ratio = oxidisingPowerRatio(Object.keys(oxidising), 'tabulated');
+      const ratio = oxidisingPowerRatio(Object.keys(oxidising), 'tabulated', publishedOnly);
       return ratio.ok ? ok(100 * evaluateRatio(ratio.value, fractions(oxidising))) : fail(ratio.reason);
     },
   });

@@ -96,7 +96,7 @@ const oxygenEnriched: Recipe = {
     waterCapacity: '29.5 L', workingPressure: gauge('2216 psi'), workingPressureTemperature: '21.1 °C', testPressure: gauge('3693 psi'),
   }),
   parents: [oxygen50, nitrogen50],
-  gauges: [{ key: 'g1', name: 'P1', unit: 'psi', reference: 'gauge', fullScale: '3000 psi', accuracy: '0.1 %', resolution: '1 psi' }],
+  gauges: [{ key: 'g1', name: 'P1', unit: 'psi', reference: 'gauge', fullScale: '3000 psi', accuracy: '0.1 %', accuracyOf: 'span', resolution: '1 psi', calibrated: '2026-09-14' }],
 };
 
 /** Saved on the first start; the first one opens. */

@@ -1,4 +1,4 @@
-import { defaultConditions, defaultCylinder } from '../defaults.ts';
+import { defaultConditions, defaultCylinder, parentNamed, purityTable } from '../defaults.ts';
 import type { CompositionLine, Conditions, Cylinder, Gauge, Parent } from '../document.ts';
 
 /**
@@ -7,9 +7,9 @@ import type { CompositionLine, Conditions, Cylinder, Gauge, Parent } from '../do
  */
 
 export const benchGauges: readonly Gauge[] = [
-  { key: 'g1', name: 'G1', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.05 %', resolution: '0.01 bar' },
-  { key: 'g2', name: 'G2', unit: 'bar', reference: 'gauge', fullScale: '16 bar', accuracy: '0.1 %', resolution: '0.001 bar' },
-  { key: 'g3', name: 'G3', unit: 'mbar', reference: 'absolute', fullScale: '1330 mbar', accuracy: '0.15 %', resolution: '0.1 mbar' },
+  { key: 'g1', name: 'G1', unit: 'bar', reference: 'gauge', fullScale: '250 bar', accuracy: '0.05 %', accuracyOf: 'span', resolution: '0.01 bar', calibrated: '2026-09-14' },
+  { key: 'g2', name: 'G2', unit: 'bar', reference: 'gauge', fullScale: '16 bar', accuracy: '0.1 %', accuracyOf: 'span', resolution: '0.001 bar', calibrated: '2026-09-14' },
+  { key: 'g3', name: 'G3', unit: 'mbar', reference: 'absolute', fullScale: '1330 mbar', accuracy: '0.15 %', accuracyOf: 'span', resolution: '0.1 mbar', calibrated: '2026-09-14' },
 ];
 
 export const benchConditions: Conditions = {
@@ -39,7 +39,7 @@ export function benchCylinder(id: string, more: Partial<Cylinder> = {}): Cylinde
 
 /** A parent from the laboratory's rack; pressures are gauge. */
 export function rackParent(key: string, name: string, pressure: string, composition: readonly CompositionLine[]): Parent {
-  return { key, name, composition, pressure: { typed: pressure, reference: 'gauge' } };
+  return parentNamed(key, name, { composition: purityTable(composition), pressure: { typed: pressure, reference: 'gauge' } });
 }
 
 export const nitrogen50 = rackParent('n2', 'N₂ 5.0', '200 bar', [

@@ -12,7 +12,7 @@ export { fileProblemSentence } from './sentences.ts';
 const format = 'fillwright-recipe';
 
 /** A recipe within its bounds cannot reach this; a longer text is not worth parsing. */
-export const largestRecipeFile = 8_000_000;
+export const largestRecipeFile = 12_000_000;
 
 /** A recipe read from a file, with the version and program that wrote it. */
 export interface RecipeFile {

@@ -8,8 +8,11 @@ import type { FileProblem } from './problem.ts';
  */
 export type Migrations = Readonly<Record<number, (old: unknown) => unknown>>;
 
-/** No version before the present one was ever released. */
-export const migrations: Migrations = {};
+/** The steps to the present version. */
+export const migrations: Migrations = {
+  // Version 2 only added fields, which the schema fills with what version 1 meant: one cylinder, nothing split, no conditioning.
+  1: (recipe) => recipe,
+};
 
 /**
  * Takes the recipe part of a file from `version` to `newest`, one step at a time.

@@ -1,5 +1,7 @@
 import * as v from 'valibot';
-import { defaultConditions, defaultContents, defaultCylinder, defaultRoute, unstatedPressure } from '../defaults.ts';
+import {
+  defaultBatch, defaultConditions, defaultContents, defaultCylinder, defaultRoute, noSplit, unstatedPressure,
+} from '../defaults.ts';
 import type { Recipe } from '../document.ts';
 
 /**
@@ -29,6 +31,13 @@ const pressure = (description: string) => v.pipe(
 const gas = () => short('A gas by name, formula, CAS number or synonym: "carbon dioxide", "CO2".');
 const amount = () => short('"5 %", "50 µmol/mol", "balance", or "< 1 µmol/mol" below a limit of detection.');
 const compositionLine = v.strictObject({ gas: gas(), amount: amount() });
+
+const purityLine = v.strictObject({
+  gas: gas(),
+  amount: amount(),
+  uncertainty: v.optional(short('Expanded uncertainty (k = 2), "1 %" of the amount or "0.5 µmol/mol".'), ''),
+  basis: v.optional(v.picklist(['certified', 'typical']), 'certified'),
+});
 
 const order = v.pipe(
   v.strictObject({
@@ -76,6 +85,10 @@ const cylinder = v.pipe(
     pressureExpansion: v.optional(short('Relative volume growth per bar; empty: the material\'s own value.'), ''),
     thermalExpansion: v.optional(short('Linear expansion per kelvin; empty: the material\'s own value.'), ''),
     startReading: v.optional(short('Balance reading before the first addition; empty: only gains are planned.'), ''),
+    testDue: v.optional(short('Date of the next test: "2027-03-31".'), ''),
+    valveOutlet: v.optional(short('As written on the cylinder.'), ''),
+    held: v.optional(short('Gases it has held since it was cleaned.'), ''),
+    conditionedFor: v.optional(short('What its inside was prepared for.'), ''),
     contents,
   }),
   v.description('The cylinder to be filled.'),
@@ -84,8 +97,16 @@ const cylinder = v.pipe(
 const parent = v.strictObject({
   key: short('Unique within the recipe, used by the steps: "p1".'),
   name: v.optional(short('What the parent is called on the sheet.'), ''),
-  composition: listOf(compositionLine, 'Purity table; at most one line is "balance".'),
+  composition: listOf(purityLine, 'Purity table; at most one line is "balance".'),
   pressure: v.optional(pressure('Supply pressure; empty text: not stated.'), unstatedPressure),
+  temperature: v.optional(short('Gas temperature of that pressure; empty: the room\'s.'), ''),
+  waterCapacity: v.optional(short('Of the parent\'s cylinder, "50 L".'), ''),
+  filling: v.optional(v.picklist(['gas', 'liquefied']), 'gas'),
+  contentMass: v.optional(short('Mass of gas left in a liquefied parent.'), ''),
+  lot: v.optional(short('Lot or certificate number.'), ''),
+  expiry: v.optional(short('Last day of use: "2027-06-30".'), ''),
+  location: v.optional(short('Where it stands.'), ''),
+  stock: v.optional(short('Key of the stock entry it was copied from.'), ''),
 });
 
 const gauge = v.strictObject({
@@ -94,8 +115,10 @@ const gauge = v.strictObject({
   unit: short('The unit on its face: "bar", "psi".'),
   reference: v.picklist(['gauge', 'absolute']),
   fullScale: short('Upper end of the scale in its own unit and reference.'),
-  accuracy: short('Percent of span: "0.25 %".'),
+  accuracy: short('Half-width in percent: "0.25 %".'),
+  accuracyOf: v.optional(v.picklist(['span', 'reading']), 'span'),
   resolution: short('Smallest readable step in its own unit.'),
+  calibrated: v.optional(short('Date of its last calibration.'), ''),
 });
 
 const route = v.pipe(
@@ -103,10 +126,18 @@ const route = v.pipe(
     by: v.optional(v.picklist(['pressure', 'mass', 'pressure and mass']), defaultRoute.by),
     sequence: v.optional(
       v.pipe(
-        v.picklist(['smallest first', 'as listed']),
-        v.description('"as listed" adds the parents in the order of the file.'),
+        v.picklist(['best', 'smallest first', 'as listed']),
+        v.description('"as listed" adds the parents in the order of the file; "best" lets the checks choose.'),
       ),
       defaultRoute.sequence,
+    ),
+    split: v.optional(
+      v.strictObject({
+        parent: short('Key of the parent added in two parts; empty: none.'),
+        share: short('Share of its amount that goes in early: "50 %".'),
+        before: short('Key of the parent before which it goes in; empty: first.'),
+      }),
+      noSplit,
     ),
     steps: v.optional(
       listOf(
@@ -122,6 +153,32 @@ const route = v.pipe(
   }),
   v.description('How the fill is measured and in which order.'),
 );
+
+const conditioningStep = v.variant('kind', [
+  v.strictObject({ kind: v.literal('lower'), to: pressure('Let out or pump down to this.') }),
+  v.strictObject({
+    kind: v.literal('purge'),
+    parent: short('Key of the parent that purges.'),
+    low: pressure('Down to this in each cycle.'),
+    high: pressure('Up to this in each cycle.'),
+    cycles: short('How many; empty: as many as needed.'),
+    wanted: short('Largest fraction of the old gas left; empty: not asked.'),
+  }),
+  v.strictObject({ kind: v.literal('free'), text: short('Bake, passivation, hold: words for the sheet.') }),
+]);
+
+const batch = v.strictObject({
+  cylinders: short('How many identical cylinders: "1".'),
+  together: v.boolean(),
+  boosterInlet: pressure('Lowest pressure a booster draws from; empty text: no booster.'),
+});
+
+const laboratoryValue = v.strictObject({
+  id: short('What it replaces: "lfl:methane".'),
+  value: short('A number in the unit of the published value.'),
+  source: short('Where it was read.'),
+  date: short('When.'),
+});
 
 const conditions = v.pipe(
   v.strictObject({
@@ -143,6 +200,8 @@ const conditions = v.pipe(
     ),
     standardPressure: v.optional(v.picklist(['1 bar', '1 atm']), defaultConditions.standardPressure),
     balanceResolution: v.optional(short('Smallest step the balance shows.'), defaultConditions.balanceResolution),
+    balance: v.optional(short('Which balance: words for the sheet.'), ''),
+    thermometer: v.optional(short('Which thermometer: words for the sheet.'), ''),
   }),
   v.description('Conditions of the day and reference states.'),
 );
@@ -162,13 +221,18 @@ export const recipeSchema = v.strictObject({
   cylinder,
   parents: listOf(parent, 'The gases to add, in the technician\'s own order.'),
   gauges: v.optional(listOf(gauge, 'The pressure gauges at the filling place.'), []),
+  conditioning: v.optional(listOf(conditioningStep, 'What is done to the cylinder before the first addition.'), []),
   route: v.optional(route, defaultRoute as v.InferInput<typeof route>),
+  batch: v.optional(batch, defaultBatch),
   conditions: v.optional(conditions, {}),
+  values: v.optional(
+    v.pipe(v.array(laboratoryValue), v.maxLength(500), v.description('The laboratory\'s own limits and coefficients.')), [],
+  ),
   overrides: v.optional(listOf(override, 'Decisions of named persons on holds.'), []),
 });
 
-/** First and so far only version of the file format. */
-export const recipeFileVersion = 1;
+/** Newest version of the file format. */
+export const recipeFileVersion = 2;
 
 /** The file that people exchange. */
 export const recipeFileSchema = v.pipe(

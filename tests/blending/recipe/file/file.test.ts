@@ -19,11 +19,11 @@ function damaged(path: Path, leaf: unknown) {
 describe('encodeRecipeFile', () => {
   it('is read back as the same recipe, with version and program', () => {
     const read = decodeRecipeFile(encodeRecipeFile(emptyRecipe, 'fillwright 0.1.0'));
-    expect(read).toEqual({ ok: true, value: { recipe: emptyRecipe, version: 1, program: 'fillwright 0.1.0' } });
+    expect(read).toEqual({ ok: true, value: { recipe: emptyRecipe, version: 2, program: 'fillwright 0.1.0' } });
   });
 
   it('is indented JSON that ends with a newline', () => {
-    expect(encodeRecipeFile(emptyRecipe, 'x')).toMatch(/^\{\n {2}"format": "fillwright-recipe",\n {2}"version": 1,\n[^]*\}\n$/);
+    expect(encodeRecipeFile(emptyRecipe, 'x')).toMatch(/^\{\n {2}"format": "fillwright-recipe",\n {2}"version": 2,\n[^]*\}\n$/);
   });
 
   it('can be read back at the bounds of every list and text, however it is escaped', () => {
@@ -31,14 +31,23 @@ describe('encodeRecipeFile', () => {
     const long = '\u0001'.repeat(recipeBounds.longText);
     const pressure = { typed: text, reference: 'gauge' } as const;
     const forty = <Item>(item: Item) => Array.from({ length: recipeBounds.lines }, () => item);
-    const composition = forty({ gas: text, amount: text });
+    const composition = forty({ gas: text, amount: text, uncertainty: text, basis: 'typical' as const });
     const largest: Recipe = {
       ...emptyRecipe,
       name: text,
       note: long,
       order: { ...emptyRecipe.order, components: forty({ gas: text, amount: text, tolerance: text }) },
-      parents: forty({ key: text, name: text, composition, pressure }),
-      gauges: forty({ key: text, name: text, unit: text, reference: 'gauge', fullScale: text, accuracy: text, resolution: text }),
+      parents: forty({
+        key: text, name: text, composition, pressure, temperature: text, waterCapacity: text, filling: 'liquefied' as const,
+        contentMass: text, lot: text, expiry: text, location: text, stock: text,
+      }),
+      conditioning: forty({ kind: 'purge' as const, parent: text, low: pressure, high: pressure, cycles: text, wanted: text }),
+      batch: { cylinders: text, together: true, boosterInlet: pressure },
+      values: Array.from({ length: 500 }, () => ({ id: text, value: text, source: text, date: text })),
+      gauges: forty({
+        key: text, name: text, unit: text, reference: 'gauge' as const, fullScale: text, accuracy: text, accuracyOf: 'reading' as const,
+        resolution: text, calibrated: text,
+      }),
       route: { ...emptyRecipe.route, steps: forty({ parent: text, gasTemperature: text, gauge: text }) },
       overrides: forty({ finding: text, figure: text, name: text, reason: long }),
     };
@@ -90,8 +99,8 @@ describe('decodeRecipeFile', () => {
   });
 
   it('refuses a newer version without looking further', () => {
-    expect(problem({ format: 'fillwright-recipe', version: 2, whatever: true })).toEqual({
-      code: 'newer-version', version: 2, newest: 1,
+    expect(problem({ format: 'fillwright-recipe', version: 3, whatever: true })).toEqual({
+      code: 'newer-version', version: 3, newest: 2,
     });
   });
 

@@ -1,5 +1,6 @@
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { readRecipeDocument } from '../../../../src/blending/recipe/file/file.ts';
+import { decodeRecipeFile, readRecipeDocument } from '../../../../src/blending/recipe/file/file.ts';
 import { migrate, migrations } from '../../../../src/blending/recipe/file/migrations.ts';
 import { recipeFileVersion } from '../../../../src/blending/recipe/file/schema.ts';
 import { example, withLeaf } from './example.ts';
@@ -33,9 +34,18 @@ describe('migrate', () => {
 });
 
 describe('readRecipeDocument with migrations', () => {
+  it('opens a recipe of version 1 as what it meant then: one cylinder, nothing split, every figure published', () => {
+    const text = readFileSync(new URL('../../../fixtures/recipes/example-version-1.json', import.meta.url), 'utf8');
+    const now = decodeRecipeFile(text.replace('"version": 1', '"version": 2'));
+    const read = decodeRecipeFile(text);
+    expect(read).toMatchObject({ ok: true, value: { version: 1, recipe: { conditioning: [], values: [], batch: { cylinders: '1' } } } });
+    expect(read.ok && now.ok && read.value.recipe).toEqual(now.ok && now.value.recipe);
+  });
+
+
   it('brings an old file to the present form, then checks it', () => {
     const name = (example() as { recipe: { name: string } }).recipe.name;
-    const old = withLeaf(withLeaf(example(), ['recipe', 'name'], undefined), ['recipe', 'title'], name);
+    const old = withLeaf(withLeaf(withLeaf(example(), ['version'], 1), ['recipe', 'name'], undefined), ['recipe', 'title'], name);
     const read = readRecipeDocument(old, invented, 3);
     expect(read.ok && read.value).toMatchObject({ version: 1, recipe: { name } });
     expect(readRecipeDocument(old).ok).toBe(false);

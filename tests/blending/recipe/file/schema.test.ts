@@ -36,7 +36,7 @@ describe('public/recipe.schema.json', () => {
 });
 
 const damage: readonly (readonly [Path, unknown])[] = [
-  [['format'], 'something'], [['format'], undefined], [['version'], 0], [['version'], 2], [['version'], '1'],
+  [['format'], 'something'], [['format'], undefined], [['version'], 0], [['version'], 3], [['version'], '1'],
   [['version'], undefined], [['program'], 1], [['extra'], true], [['$schema'], 3], [['recipe'], undefined], [['recipe'], []],
   [['recipe', 'name'], undefined], [['recipe', 'name'], 5], [['recipe', 'name'], 'x'.repeat(201)],
   [['recipe', 'note'], 'x'.repeat(2001)], [['recipe', 'note'], null], [['recipe', 'order'], undefined],

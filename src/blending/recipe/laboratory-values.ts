@@ -1,0 +1,49 @@
+import { parseNumberText, pascal } from '../../units/index.ts';
+import { publishedOnly } from '../values/value.ts';
+import type { LaboratoryValues, OwnValue } from '../values/value.ts';
+import type { LaboratoryValue } from './document.ts';
+import type { RecipeProblem } from './problem.ts';
+import { FieldReader } from './reader.ts';
+
+/** Bounds of a figure: far beyond any coefficient or limit, and its reciprocal can still be computed with. */
+const LEAST = 1e-9;
+const MOST = 1e9;
+
+/**
+ * Reads the laboratory's own values: each a bare number in the unit of what it
+ * replaces, with where and when it was read. What lacks its source or its date
+ * is a problem like an unreadable number, since nobody could check it.
+ */
+export function readLaboratoryValues(reader: FieldReader, values: readonly LaboratoryValue[]): LaboratoryValues {
+  if (values.length === 0) return publishedOnly;
+  const own = new Map<string, OwnValue>();
+  for (const { id, value, source, date } of values) {
+    const field = `values.${id}`;
+    if (own.has(id)) reader.problems.push({ code: 'key-repeated', field, key: id });
+    if (source.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.source` });
+    if (date.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.date` });
+    own.set(id, { value: readNumber(reader, `${field}.value`, value), source: source.trim(), date: date.trim() });
+  }
+  return own;
+}
+
+function readNumber(reader: FieldReader, field: string, text: string): number {
+  const number = parseNumberText(text);
+  if (!number.ok) {
+    reader.problems.push({ code: 'entry', field, problem: number.reason });
+    return 1;
+  }
+  const { value, rest } = number.value;
+  if (rest !== '') reader.problems.push({ code: 'number-alone', field, text });
+  else if (!(value > 0)) reader.problems.push({ code: 'not-positive', field });
+  else if (value < LEAST || value > MOST) reader.problems.push({ code: 'value-beyond', field, lowest: LEAST, highest: MOST });
+  return value;
+}
+
+/** What is wrong with one value before it is taken, as a recipe that holds it would say. */
+export function laboratoryValueProblems(value: LaboratoryValue): readonly RecipeProblem[] {
+  // No pressure is read here, so the barometer plays no part.
+  const reader = new FieldReader(pascal(101_325));
+  readLaboratoryValues(reader, [value]);
+  return reader.problems;
+}
