@@ -33,4 +33,6 @@ export interface Finding {
   readonly limit: string;
   readonly source: string;
   readonly trust: Trust;
+  /** Ids of the published values in whose place the laboratory's own were asked for. */
+  readonly replaced: readonly string[];
 }

@@ -6,6 +6,8 @@ import type { GasRatio } from './gas-ratio.ts';
 import { rolesOf } from './gas-roles.ts';
 import type { GasRole, RoleReason } from './gas-roles.ts';
 import { perGases } from './per-gases.ts';
+import { valueIn } from '../values/value.ts';
+import type { LaboratoryValues, RuleValue } from '../values/value.ts';
 
 /**
  * Fuel and oxidiser in one cylinder, measured against limits of published
@@ -20,17 +22,20 @@ export interface FuelOxidiserScale {
   readonly fuel: GasRatio;
   readonly oxygen: GasRatio;
   readonly roles: readonly GasRole[];
+  /** What the scale was made with. */
+  readonly values: LaboratoryValues;
 }
 
 /** Makes the scale for a list of gases. Fails with `gas-not-classified`. */
-export const fuelOxidiserScale = perGases((gases): Outcome<FuelOxidiserScale, RoleReason> => {
-  const roles = rolesOf(gases, 'cautious');
+export const fuelOxidiserScale = perGases((gases, values): Outcome<FuelOxidiserScale, RoleReason> => {
+  const roles = rolesOf(gases, 'cautious', values);
   if (!roles.ok) return roles;
   const under = roles.value.map((role) => (role.role === 'inert' ? Math.min(role.equivalency, 1) : 1));
   return ok({
     fuel: { over: roles.value.map((role) => (role.role === 'fuel' ? 100 / role.row.lflPercent : 0)), under },
     oxygen: { over: roles.value.map((role) => (role.role === 'oxidiser' ? role.coefficient : 0)), under },
     roles: roles.value,
+    values,
   });
 });
 
@@ -54,16 +59,17 @@ export interface LimitingOxygen {
 }
 
 /** A fuel that makes less than this share of the fuel load does not set the limit. */
-const negligibleShare = 0.01;
+export const negligibleShare: RuleValue = { id: 'negligible-fuel-share', value: 0.01 };
 
 export function limitingOxygen(scale: FuelOxidiserScale, mixtures: readonly ArrayLike<number>[]): LimitingOxygen {
+  const negligible = valueIn(scale.values, negligibleShare);
   let lowest: LimitingOxygen = { fraction: 1, standIn: false };
   for (const fractions of mixtures) {
     const loads = scale.fuel.over.map((weight, i) => weight * (fractions[i] ?? 0));
     const total = loads.reduce((sum, load) => sum + load, 0);
     scale.roles.forEach((role, i) => {
-      if (role.role !== 'fuel' || (loads[i] ?? 0) <= negligibleShare * total) return;
-      const { percent, standIn } = cautiousLimitingOxygen(role.row);
+      if (role.role !== 'fuel' || (loads[i] ?? 0) <= negligible * total) return;
+      const { percent, standIn } = cautiousLimitingOxygen(role.row, scale.values);
       if (percent / 100 < lowest.fraction) lowest = { fraction: percent / 100, standIn };
     });
   }
@@ -75,30 +81,39 @@ export function limitingOxygen(scale: FuelOxidiserScale, mixtures: readonly Arra
  * another absolute pressure. It falls with pressure and no published table
  * covers a cylinder, so above 10 bar only half is. (Own choice, no source.)
  */
-export function pressureAllowance(pressure: Pascal): number {
-  return pressure > 10e5 ? 0.5 : 1;
+export function pressureAllowance(pressure: Pascal, values: LaboratoryValues): number {
+  return pressure > valueIn(values, allowance.from) * 1e5 ? valueIn(values, allowance.share) : 1;
 }
+
+/** The two figures of `pressureAllowance`: bar absolute, and a share. */
+export const allowance = {
+  from: { id: 'oxygen-allowance-from', value: 10 },
+  share: { id: 'oxygen-allowance', value: 0.5 },
+} as const satisfies Record<string, RuleValue>;
 
 /** Thresholds, as shares of the lower flammable limit and of the limiting oxygen concentration. */
 export const together = {
   /** Below either of these the fuel or the oxygen is too little for a hold (common practice). */
-  fuelShare: 0.25,
-  oxygenShare: 0.6,
+  fuelShare: { id: 'hold-fuel-share', value: 0.25 },
+  oxygenShare: { id: 'hold-oxygen-share', value: 0.6 },
   /** Below either of these it is a trace, worth a note only. */
-  traceShare: 0.01,
+  traceShare: { id: 'trace-share', value: 0.01 },
   /** Below either of these it is an impurity of a parent and not worth a word (own choice). */
-  impurityShare: 1e-4,
-} as const;
+  impurityShare: { id: 'impurity-share', value: 1e-4 },
+} as const satisfies Record<string, RuleValue>;
 
 /** How a homogeneous mixture of fuel and oxidiser is judged; `none` when one of them is absent or an impurity. */
 export type TogetherClass = 'none' | 'trace' | 'lean' | 'hold';
 
 /** Judges a homogeneous mixture at an absolute pressure. */
-export function classifyTogether(point: FuelOxidiserPoint, limit: LimitingOxygen, pressure: Pascal): TogetherClass {
-  const oxygenOfLimit = point.oxygen / (limit.fraction * pressureAllowance(pressure));
-  if (point.fuelOfLfl < together.impurityShare || oxygenOfLimit < together.impurityShare) return 'none';
-  if (point.fuelOfLfl < together.traceShare || oxygenOfLimit < together.traceShare) return 'trace';
-  const enough = point.fuelOfLfl >= together.fuelShare && oxygenOfLimit >= together.oxygenShare;
+export function classifyTogether(
+  point: FuelOxidiserPoint, limit: LimitingOxygen, pressure: Pascal, values: LaboratoryValues,
+): TogetherClass {
+  const oxygenOfLimit = point.oxygen / (limit.fraction * pressureAllowance(pressure, values));
+  const either = Math.min(point.fuelOfLfl, oxygenOfLimit);
+  if (either < valueIn(values, together.impurityShare)) return 'none';
+  if (either < valueIn(values, together.traceShare)) return 'trace';
+  const enough = point.fuelOfLfl >= valueIn(values, together.fuelShare) && oxygenOfLimit >= valueIn(values, together.oxygenShare);
   return enough ? 'hold' : 'lean';
 }
 

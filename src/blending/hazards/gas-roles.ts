@@ -2,8 +2,9 @@ import { fail, ok } from '../../units/index.ts';
 import type { Outcome } from '../../units/index.ts';
 import { flammableRow } from './data/flammable-gases.ts';
 import type { FlammableRow } from './data/flammable-gases.ts';
-import { cautiousEquivalency, inertRow, polyatomicDefault } from './data/inert-gases.ts';
+import { equivalencyOf, inertRow } from './data/inert-gases.ts';
 import { oxidiserRow } from './data/oxidising-gases.ts';
+import type { LaboratoryValues } from '../values/value.ts';
 
 /**
  * Which set of coefficients to use. `tabulated`: the standard's own figures, as
@@ -28,31 +29,32 @@ export interface RoleReason {
  * Role and coefficients of one gas. `standIn` tells that the figure used is not
  * the standard's own: a missing or remembered Tci becomes the lower flammable
  * limit (below it no addition of air can make the gas burn), a missing Kk the
- * lowest of the table.
+ * lowest of the table. A figure of the laboratory's own is never replaced.
  */
-export function roleOf(gas: string, coefficients: Coefficients): Outcome<GasRole, RoleReason> {
-  const fuel = flammableRow(gas);
+export function roleOf(gas: string, coefficients: Coefficients, values: LaboratoryValues): Outcome<GasRole, RoleReason> {
+  const fuel = flammableRow(gas, values);
   if (fuel) {
     const tci = coefficients === 'cautious' && fuel.tci?.trust !== 'seen' ? null : fuel.tci;
     return ok({ role: 'fuel', row: fuel, tciPercent: tci?.percent ?? fuel.lflPercent, standIn: tci === null });
   }
-  const oxidiser = oxidiserRow(gas);
+  const oxidiser = oxidiserRow(gas, values);
   if (oxidiser) {
     return ok({ role: 'oxidiser', coefficient: oxidiser.coefficient, standIn: oxidiser.trust !== 'seen' });
   }
-  const inert = inertRow(gas);
+  const inert = inertRow(gas, values);
   if (inert) {
-    const missing = coefficients === 'cautious' ? cautiousEquivalency : polyatomicDefault;
-    return ok({ role: 'inert', equivalency: inert.listed ?? missing, standIn: inert.listed === null });
+    return ok({ role: 'inert', equivalency: equivalencyOf(inert, coefficients, values), standIn: inert.listed === null });
   }
   return fail({ code: 'gas-not-classified', gas });
 }
 
 /** Roles of a list of gases, in its order; the first unknown gas is the reason. */
-export function rolesOf(gases: readonly string[], coefficients: Coefficients): Outcome<readonly GasRole[], RoleReason> {
+export function rolesOf(
+  gases: readonly string[], coefficients: Coefficients, values: LaboratoryValues,
+): Outcome<readonly GasRole[], RoleReason> {
   const roles: GasRole[] = [];
   for (const gas of gases) {
-    const role = roleOf(gas, coefficients);
+    const role = roleOf(gas, coefficients, values);
     if (!role.ok) return role;
     roles.push(role.value);
   }

@@ -5,6 +5,8 @@ import type { GasRatio } from './gas-ratio.ts';
 import { rolesOf } from './gas-roles.ts';
 import type { Coefficients, GasRole, RoleReason } from './gas-roles.ts';
 import { perGases } from './per-gases.ts';
+import { publishedOnly } from '../values/value.ts';
+import type { LaboratoryValues, RuleValue } from '../values/value.ts';
 
 /**
  * ISO 10156:2017 (4th edition): is a finished gas flammable in air, is it more
@@ -14,9 +16,9 @@ import { perGases } from './per-gases.ts';
  */
 
 /** Above this the mixture is treated as flammable in air (clause 4.3). */
-export const flammableAbove = 1;
+export const flammableAbove: RuleValue = { id: 'flammable-sum', value: 1 };
 /** Oxidising power above which a gas is oxidising, % (clause 5.3). */
-export const oxidisingAbovePercent = 23.5;
+export const oxidisingAbovePercent: RuleValue = { id: 'oxidising-power', value: 23.5 };
 
 /**
  * Σ A′ᵢ/Tciᵢ of clause 4.3 as a ratio over `gases`. Oxidisers count on neither
@@ -24,12 +26,16 @@ export const oxidisingAbovePercent = 23.5;
  *
  * Fails with `gas-not-classified`.
  */
-export function flammabilityRatio(gases: readonly string[], coefficients: Coefficients): Outcome<GasRatio, RoleReason> {
-  return flammabilityRatios[coefficients](gases);
+export function flammabilityRatio(
+  gases: readonly string[], coefficients: Coefficients, values: LaboratoryValues,
+): Outcome<GasRatio, RoleReason> {
+  return flammabilityRatios[coefficients](gases, values);
 }
 
-function makeFlammabilityRatio(gases: readonly string[], coefficients: Coefficients): Outcome<GasRatio, RoleReason> {
-  const roles = rolesOf(gases, coefficients);
+function makeFlammabilityRatio(
+  gases: readonly string[], coefficients: Coefficients, values: LaboratoryValues,
+): Outcome<GasRatio, RoleReason> {
+  const roles = rolesOf(gases, coefficients, values);
   if (!roles.ok) return roles;
   return ok({
     over: roles.value.map((role) => (role.role === 'fuel' ? 100 / role.tciPercent : 0)),
@@ -44,12 +50,16 @@ function makeFlammabilityRatio(gases: readonly string[], coefficients: Coefficie
  *
  * Fails with `gas-not-classified`.
  */
-export function oxidisingPowerRatio(gases: readonly string[], coefficients: Coefficients): Outcome<GasRatio, RoleReason> {
-  return oxidisingPowerRatios[coefficients](gases);
+export function oxidisingPowerRatio(
+  gases: readonly string[], coefficients: Coefficients, values: LaboratoryValues,
+): Outcome<GasRatio, RoleReason> {
+  return oxidisingPowerRatios[coefficients](gases, values);
 }
 
-function makeOxidisingPowerRatio(gases: readonly string[], coefficients: Coefficients): Outcome<GasRatio, RoleReason> {
-  const roles = rolesOf(gases, coefficients);
+function makeOxidisingPowerRatio(
+  gases: readonly string[], coefficients: Coefficients, values: LaboratoryValues,
+): Outcome<GasRatio, RoleReason> {
+  const roles = rolesOf(gases, coefficients, values);
   if (!roles.ok) return roles;
   return ok({
     over: roles.value.map((role) => (role.role === 'oxidiser' ? role.coefficient : 0)),
@@ -58,12 +68,12 @@ function makeOxidisingPowerRatio(gases: readonly string[], coefficients: Coeffic
 }
 
 const flammabilityRatios = {
-  tabulated: perGases((gases) => makeFlammabilityRatio(gases, 'tabulated')),
-  cautious: perGases((gases) => makeFlammabilityRatio(gases, 'cautious')),
+  tabulated: perGases((gases, values) => makeFlammabilityRatio(gases, 'tabulated', values)),
+  cautious: perGases((gases, values) => makeFlammabilityRatio(gases, 'cautious', values)),
 };
 const oxidisingPowerRatios = {
-  tabulated: perGases((gases) => makeOxidisingPowerRatio(gases, 'tabulated')),
-  cautious: perGases((gases) => makeOxidisingPowerRatio(gases, 'cautious')),
+  tabulated: perGases((gases, values) => makeOxidisingPowerRatio(gases, 'tabulated', values)),
+  cautious: perGases((gases, values) => makeOxidisingPowerRatio(gases, 'cautious', values)),
 };
 
 /** One flammable gas in the test of clause 4.3. */
@@ -88,10 +98,11 @@ export function flammability(
   gases: readonly string[],
   fractions: ArrayLike<number>,
   coefficients: Coefficients = 'tabulated',
+  values: LaboratoryValues = publishedOnly,
 ): Outcome<Flammability, RoleReason> {
-  const roles = rolesOf(gases, coefficients);
+  const roles = rolesOf(gases, coefficients, values);
   if (!roles.ok) return roles;
-  const ratio = flammabilityRatio(gases, coefficients);
+  const ratio = flammabilityRatio(gases, coefficients, values);
   if (!ratio.ok) return ratio;
   const under = weightedSum(ratio.value.under, fractions);
   const terms = roles.value.flatMap((role, i) => {
@@ -114,8 +125,9 @@ export function flammability(
 export function lowerFlammableLimit(
   gases: readonly string[],
   fractions: ArrayLike<number>,
+  values: LaboratoryValues,
 ): Outcome<number, RoleReason | { readonly code: 'no-flammable-gas' } | { readonly code: 'limit-not-computed' }> {
-  const roles = rolesOf(gases, 'tabulated');
+  const roles = rolesOf(gases, 'tabulated', values);
   if (!roles.ok) return roles;
   const fuel = weightedSum(roles.value.map((role) => (role.role === 'fuel' ? 1 : 0)), fractions);
   if (fuel <= 0) return fail({ code: 'no-flammable-gas' });

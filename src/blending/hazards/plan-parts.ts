@@ -8,7 +8,7 @@ export function usedParents(plan: UncheckedPlan): readonly JobParent[] {
 }
 
 /** The parent of a step, or undefined when the plan does not know it. */
-export function parentOf(plan: UncheckedPlan, key: string): JobParent | undefined {
+export function parentOf(plan: Pick<UncheckedPlan, 'job'>, key: string): JobParent | undefined {
   return plan.job.parents.find((parent) => parent.key === key);
 }
 

@@ -59,6 +59,8 @@ export interface FindingParts {
 /** Shown as figure when a check could not be made. */
 export const NOT_COMPUTED = 'not computed';
 
+const none: readonly string[] = [];
+
 /** Builds a finding of a rule; its id is rule, place and, where needed, what it is about. */
 export function finding(card: RuleCard, parts: FindingParts): Finding {
   const { verdict, place, words, figure, limit, trust, about } = parts;
@@ -73,6 +75,7 @@ export function finding(card: RuleCard, parts: FindingParts): Finding {
     limit,
     source: `${card.source} (${card.edition})`,
     trust: trust ?? card.trust,
+    replaced: none,
   };
 }
 

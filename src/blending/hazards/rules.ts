@@ -1,57 +1,27 @@
 import type { HazardRule } from './rule.ts';
-import { balanceTooCoarse } from './rules/balance.ts';
-import { carbonMonoxidePressure } from './rules/carbon-monoxide-pressure.ts';
 import { condensationAtStep } from './rules/condensation-step.ts';
-import { condensationInStorage } from './rules/condensation-storage.ts';
 import { contentsNotStated } from './rules/contents.ts';
-import { cylinderMaterial } from './rules/cylinder-material.ts';
-import { flammableGas } from './rules/flammable-gas.ts';
 import { fuelMeetsOxidiser } from './rules/fuel-meets-oxidiser.ts';
 import { fuelWithOxidiser } from './rules/fuel-with-oxidiser.ts';
-import { cubicGas, estimatedPairs, modelRange, nitrogenDioxidePairs } from './rules/gas-model.ts';
 import { gaugeOverRange, gaugeTooCoarse } from './rules/gauge.ts';
-import { oxidisingGas } from './rules/oxidising-gas.ts';
-import { oxygenCompressionHeat } from './rules/oxygen-compression.ts';
-import { oxygenEnriched } from './rules/oxygen-enriched.ts';
-import { developedPressures, pressureAt55 } from './rules/pressure-when-hot.ts';
-import { purityNotStated, unorderedGas } from './rules/purity.ts';
-import { roomFlammableRule, roomOxygenRule } from './rules/room.ts';
+import { orderNotSearched } from './rules/order-not-searched.ts';
 import { stopAboveWorkingPressure } from './rules/stop-pressure.ts';
 import { supplyPressure } from './rules/supply.ts';
-import { testPressure, twoThirdsOfTestPressure } from './rules/test-pressure.ts';
-import { toxicGas } from './rules/toxic-gas.ts';
 import { workingPressure } from './rules/working-pressure.ts';
 
-/** Every rule, the gravest subjects first; findings of equal weight keep this order. */
-export const hazardRules: readonly HazardRule[] = [
+/**
+ * The rules that judge the very first plan: what may happen while the cylinder
+ * is filled. The others come a moment later, see `all-rules.ts`.
+ */
+export const firstRules: readonly HazardRule[] = [
   fuelWithOxidiser,
   fuelMeetsOxidiser,
   workingPressure,
-  testPressure,
   stopAboveWorkingPressure,
-  twoThirdsOfTestPressure,
-  pressureAt55,
-  carbonMonoxidePressure,
   contentsNotStated,
-  oxygenEnriched,
-  oxygenCompressionHeat,
-  toxicGas,
-  flammableGas,
-  oxidisingGas,
-  condensationInStorage,
   condensationAtStep,
-  roomOxygenRule,
-  roomFlammableRule,
-  cylinderMaterial,
+  orderNotSearched,
   supplyPressure,
   gaugeOverRange,
   gaugeTooCoarse,
-  balanceTooCoarse,
-  unorderedGas,
-  purityNotStated,
-  modelRange,
-  estimatedPairs,
-  cubicGas,
-  nitrogenDioxidePairs,
-  developedPressures,
 ];

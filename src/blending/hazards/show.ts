@@ -1,9 +1,9 @@
-import {
-  formatAmountFraction, formatNumber, formatPressureInFull, formatSignificant, fraction, toPascal,
-} from '../../units/index.ts';
+import { formatPressureInFull, toPascal } from '../../units/index.ts';
 import type { Pascal, PressureReference, PressureScale, PressureUnit } from '../../units/index.ts';
 import type { UncheckedPlan } from '../plan/plan.ts';
 import { exceeds } from './pressure-limits.ts';
+
+export { showFigure, showFraction, showPercent, showShare, showStated } from '../figures.ts';
 
 /** Step to which a pressure is shown when the gauge is not finer. */
 const ordinaryStep: Partial<Record<PressureUnit, number>> = {
@@ -59,21 +59,4 @@ export function showAgainst(
     if (figure !== shownLimit || !exceeds(pressure, limit) || divide >= 1e4) return { figure, limit: shownLimit };
     divide *= 10;
   }
-}
-
-/** A fraction as percent, `23.5 %`; small ones to two digits. */
-export function showPercent(value: number, decimals = 1): string {
-  const percent = value * 100;
-  return `${Math.abs(percent) >= 1 || percent === 0 ? formatNumber(percent, Math.abs(percent) >= 100 ? 0 : decimals) : formatSignificant(percent, 2)} %`;
-}
-
-/** An amount fraction in the unit that suits its size. */
-export function showFraction(value: number): string {
-  const { number, unit } = formatAmountFraction(fraction(value), 3);
-  return `${number} ${unit}`;
-}
-
-/** A bare figure such as the ISO 10156 sum, to two decimals, more when it is small. */
-export function showFigure(value: number): string {
-  return Math.abs(value) >= 0.1 || value === 0 ? formatNumber(value, 2) : formatSignificant(value, 2);
 }

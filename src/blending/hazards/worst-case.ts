@@ -1,12 +1,15 @@
-import type { UncheckedPlan } from '../plan/plan.ts';
+import type { CylinderState } from '../plan/plan.ts';
+import type { Job } from '../recipe/job.ts';
 import { weightedSum } from './gas-ratio.ts';
 import type { GasRatio } from './gas-ratio.ts';
+import { valueIn } from '../values/value.ts';
+import type { RuleValue } from '../values/value.ts';
 
 /**
  * Relative tolerance assumed for a component ordered without one. The trade
  * calls 5 to 10 % usual; the wider end is the cautious one.
  */
-export const assumedTolerance = 0.1;
+export const assumedTolerance: RuleValue = { id: 'assumed-tolerance', value: 0.1 };
 
 /** The composition within the preparation tolerances at which a ratio is largest. */
 export interface WorstCase {
@@ -14,6 +17,12 @@ export interface WorstCase {
   readonly fractions: Float64Array;
   /** Some ordered component had no tolerance and `assumedTolerance` was used for it. */
   readonly toleranceAssumed: boolean;
+}
+
+/** What is needed of a plan. */
+export interface WorstCaseOf {
+  readonly job: Job;
+  readonly finished: Pick<CylinderState, 'fractions'>;
 }
 
 /**
@@ -25,8 +34,9 @@ export interface WorstCase {
  * at such a corner λ the linear form Σ(aᵢ − λbᵢ)xᵢ is 0 and no single change
  * raises it, so no combination does either.
  */
-export function worstCase(plan: UncheckedPlan, ratio: GasRatio): WorstCase {
+export function worstCase(plan: WorstCaseOf, ratio: GasRatio): WorstCase {
   const { order } = plan.job;
+  const assumed = valueIn(plan.job.values, assumedTolerance);
   const fractions = Float64Array.from(plan.finished.fractions);
   const balance = order.components.find((component) => component.isBalance);
   const free = order.components.filter((component) => !component.isBalance && component.nominal > 0);
@@ -37,7 +47,7 @@ export function worstCase(plan: UncheckedPlan, ratio: GasRatio): WorstCase {
   while (changed) {
     changed = false;
     for (const { gas, nominal, tolerance } of free) {
-      const width = tolerance ?? assumedTolerance;
+      const width = tolerance ?? assumed;
       for (const end of [nominal * (1 - width), nominal * (1 + width)]) {
         const kept = fractions[gas] ?? 0;
         fractions[gas] = Math.max(0, end);

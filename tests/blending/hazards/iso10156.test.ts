@@ -3,6 +3,7 @@ import { evaluateRatio } from '../../../src/blending/hazards/gas-ratio.ts';
 import { flammability, lowerFlammableLimit, oxidisingPowerRatio } from '../../../src/blending/hazards/iso10156.ts';
 import { gasIds } from '../../../src/thermo/index.ts';
 import { rolesOf } from '../../../src/blending/hazards/gas-roles.ts';
+import { publishedOnly } from '../../../src/blending/values/value.ts';
 
 type Percent = Readonly<Record<string, number>>;
 
@@ -13,7 +14,7 @@ function sumOf(mixture: Percent): number {
 }
 
 function powerOf(mixture: Percent): number {
-  const ratio = oxidisingPowerRatio(Object.keys(mixture), 'tabulated');
+  const ratio = oxidisingPowerRatio(Object.keys(mixture), 'tabulated', publishedOnly);
   if (!ratio.ok) throw new Error(ratio.reason.code);
   return 100 * evaluateRatio(ratio.value, Object.values(mixture).map((each) => each / 100));
 }
@@ -100,18 +101,18 @@ describe('lower flammable limit, clause 4.5', () => {
     ['H7', { methane: 40, 'carbon dioxide': 60 }, 11.3797, 4],
     ['H8', { hydrogen: 15, methane: 15, 'carbon dioxide': 30, nitrogen: 40 }, 14.2737, 4],
   ] as const)('published: ISO 10156:2017 (H1) and its formula recomputed, %s', (_id, mixture: Percent, expected, digits) => {
-    const limit = lowerFlammableLimit(Object.keys(mixture), Object.values(mixture).map((each) => each / 100));
+    const limit = lowerFlammableLimit(Object.keys(mixture), Object.values(mixture).map((each) => each / 100), publishedOnly);
     expect(limit.ok && limit.value).toBeCloseTo(expected, digits);
   });
 
   it('has reasons for a mixture without fuel and for one too dilute to have a limit', () => {
-    expect(lowerFlammableLimit(['nitrogen'], [1])).toMatchObject({ ok: false, reason: { code: 'no-flammable-gas' } });
-    expect(lowerFlammableLimit(['hydrogen', 'nitrogen'], [0.01, 0.99])).toMatchObject({ ok: false, reason: { code: 'limit-not-computed' } });
+    expect(lowerFlammableLimit(['nitrogen'], [1], publishedOnly)).toMatchObject({ ok: false, reason: { code: 'no-flammable-gas' } });
+    expect(lowerFlammableLimit(['hydrogen', 'nitrogen'], [0.01, 0.99], publishedOnly)).toMatchObject({ ok: false, reason: { code: 'limit-not-computed' } });
   });
 });
 
 describe('tables', () => {
   it('say of every gas of the model whether it burns, oxidises or neither', () => {
-    expect(rolesOf(gasIds, 'cautious').ok).toBe(true);
+    expect(rolesOf(gasIds, 'cautious', publishedOnly).ok).toBe(true);
   });
 });

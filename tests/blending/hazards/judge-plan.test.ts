@@ -1,6 +1,6 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { fail } from '../../../src/units/index.ts';
-import { hazardRules, judgePlan } from '../../../src/blending/hazards/index.ts';
+import { firstRules, hazardRules, judgePlan } from '../../../src/blending/hazards/index.ts';
 import type { Finding } from '../../../src/blending/hazards/index.ts';
 import { celsius, gaugeFixture, planFixture, toolsFixture } from '../../fixtures/unchecked-plan.ts';
 
@@ -68,5 +68,23 @@ describe('hazardRules', () => {
   it('have ids of their own and name source, edition and title', () => {
     expect(new Set(hazardRules.map((rule) => rule.id)).size).toBe(hazardRules.length);
     for (const rule of hazardRules) for (const text of [rule.title, rule.source, rule.edition]) expect(text.length).toBeGreaterThan(3);
+  });
+});
+
+describe('the first rules', () => {
+  it('are among all rules and keep their order; until the others have come, that counts against the plan', async () => {
+    const all = hazardRules.map((rule) => rule.id);
+    const first = firstRules.map((rule) => rule.id);
+    expect(first).toEqual(all.filter((id) => first.includes(id)));
+    vi.resetModules();
+    const fresh = await import('../../../src/blending/hazards/judge-plan.ts');
+    const early = fresh.judgePlan(bad, toolsFixture(bad));
+    expect(early.map(({ rule }) => rule)).toContain('checks-still-loading');
+    expect(early.find(({ rule }) => rule === 'checks-still-loading')).toMatchObject({ verdict: 'caution', figure: 'not computed' });
+    expect(new Set(early.map(({ rule }) => rule).filter((rule) => rule !== 'checks-still-loading'))).toEqual(
+      new Set(judgePlan(bad, toolsFixture(bad)).map(({ rule }) => rule).filter((rule) => first.includes(rule))),
+    );
+    fresh.admitRules(hazardRules);
+    expect(fresh.judgePlan(bad, toolsFixture(bad)).map(({ id }) => id)).toEqual(judgePlan(bad, toolsFixture(bad)).map(({ id }) => id));
   });
 });

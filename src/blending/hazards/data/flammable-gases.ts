@@ -1,4 +1,6 @@
 import type { Trust } from '../finding.ts';
+import { ownFigure, valueIn } from '../../values/value.ts';
+import type { LaboratoryValues, RuleValue } from '../../values/value.ts';
 
 /**
  * Flammable gases: limits in air and coefficients, in volume % at 20 °C and
@@ -21,7 +23,8 @@ export interface FlammableRow {
   readonly uflPercent: number;
   /** Highest content in nitrogen that no addition of air makes flammable; null: not found. */
   readonly tci: { readonly percent: number; readonly trust: Trust } | null;
-  readonly limitingOxygen: { readonly percent: number; readonly basis: 'vessel' | 'tube' } | null;
+  /** `own`: the laboratory's own figure, used as it stands. */
+  readonly limitingOxygen: { readonly percent: number; readonly basis: 'vessel' | 'tube' | 'own' } | null;
 }
 
 type Row = readonly [
@@ -86,9 +89,26 @@ const byGas: ReadonlyMap<string, FlammableRow> = new Map(
   ]),
 );
 
-/** The row of a flammable gas, or undefined when the gas is not in the table. */
-export function flammableRow(gas: string): FlammableRow | undefined {
-  return byGas.get(gas);
+/** Every gas of the table, in its order. */
+export const flammableGases: readonly string[] = [...byGas.keys()];
+
+/**
+ * The row of a flammable gas, or undefined when the gas is not in the table. The
+ * laboratory's own figures stand in it as seen: it read them in its own copy.
+ * Their ids are `lfl`, `ufl`, `tci` and `loc` with the gas, `lfl:methane`.
+ */
+export function flammableRow(gas: string, values: LaboratoryValues): FlammableRow | undefined {
+  const row = byGas.get(gas);
+  if (row === undefined || values.size === 0) return row;
+  const tci = ownFigure(values, 'tci', gas);
+  const oxygen = ownFigure(values, 'loc', gas);
+  return {
+    gas,
+    lflPercent: ownFigure(values, 'lfl', gas) ?? row.lflPercent,
+    uflPercent: ownFigure(values, 'ufl', gas) ?? row.uflPercent,
+    tci: tci === undefined ? row.tci : { percent: tci, trust: 'seen' },
+    limitingOxygen: oxygen === undefined ? row.limitingOxygen : { percent: oxygen, basis: 'own' },
+  };
 }
 
 /**
@@ -96,11 +116,12 @@ export function flammableRow(gas: string): FlammableRow | undefined {
  * NFPA 69 TIA 1211 does (minus 1.5 points from 10 % on, times 0.85 below); a gas
  * without a figure gets the lowest one of the table.
  */
-export function cautiousLimitingOxygen(row: FlammableRow): { readonly percent: number; readonly standIn: boolean } {
-  if (row.limitingOxygen === null) return { percent: lowestLimitingOxygen, standIn: true };
+export function cautiousLimitingOxygen(row: FlammableRow, values: LaboratoryValues): { readonly percent: number; readonly standIn: boolean } {
+  if (row.limitingOxygen === null) return { percent: valueIn(values, lowestLimitingOxygen), standIn: true };
   const { percent, basis } = row.limitingOxygen;
-  if (basis === 'vessel') return { percent, standIn: false };
+  if (basis !== 'tube') return { percent, standIn: false };
   return { percent: percent >= 10 ? percent - 1.5 : percent * 0.85, standIn: false };
 }
 
-const lowestLimitingOxygen = Math.min(...rows.map((row) => row[4]?.[0] ?? Infinity));
+/** Limiting oxygen concentration of a fuel without one, %: the lowest of the table. */
+export const lowestLimitingOxygen: RuleValue = { id: 'loc-stand-in', value: Math.min(...rows.map((row) => row[4]?.[0] ?? Infinity)) };

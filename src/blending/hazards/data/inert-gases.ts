@@ -1,3 +1,6 @@
+import { ownFigure, valueIn } from '../../values/value.ts';
+import type { LaboratoryValues, RuleValue } from '../../values/value.ts';
+
 /**
  * Inert gases and their coefficient of nitrogen equivalency Kk, ISO 10156:2017
  * Table 1 (seen). `listed: null` is a gas that the table does not name: there
@@ -27,18 +30,28 @@ const rows: readonly InertRow[] = [
 ];
 
 /** Note of Table 1: other non-flammable gases of three or more atoms. */
-export const polyatomicDefault = 1.5;
+export const polyatomicDefault: RuleValue = { id: 'kk-polyatomic', value: 1.5 };
 
 /**
  * What stands in for a missing Kk when a limit is judged: the lowest of the
  * table, because a weaker inert makes a mixture look both more flammable and
  * more oxidising.
  */
-export const cautiousEquivalency = Math.min(...rows.map((row) => row.listed ?? Infinity));
+export const cautiousEquivalency: RuleValue = { id: 'kk-stand-in', value: Math.min(...rows.map((row) => row.listed ?? Infinity)) };
 
 const byGas: ReadonlyMap<string, InertRow> = new Map(rows.map((row) => [row.gas, row]));
 
-/** The row of an inert gas, or undefined when the gas is not in the table. */
-export function inertRow(gas: string): InertRow | undefined {
-  return byGas.get(gas);
+/** Every gas of the table, in its order. */
+export const inertGases: readonly string[] = [...byGas.keys()];
+
+/** The row of an inert gas with the laboratory's own Kk (`kk:argon`), or undefined when the gas is not in the table. */
+export function inertRow(gas: string, values: LaboratoryValues): InertRow | undefined {
+  const row = byGas.get(gas);
+  const own = row && ownFigure(values, 'kk', gas);
+  return own === undefined ? row : { gas, listed: own };
+}
+
+/** Kk of a row that may have none of its own. */
+export function equivalencyOf(row: InertRow, coefficients: 'tabulated' | 'cautious', values: LaboratoryValues): number {
+  return row.listed ?? valueIn(values, coefficients === 'cautious' ? cautiousEquivalency : polyatomicDefault);
 }

@@ -1,4 +1,6 @@
 import type { Trust } from '../finding.ts';
+import { ownFigure } from '../../values/value.ts';
+import type { LaboratoryValues } from '../../values/value.ts';
 
 /**
  * Oxidising gases and their coefficient of oxygen equivalency Ci, ISO 10156:2017
@@ -21,7 +23,12 @@ const rows: readonly OxidiserRow[] = [
 
 const byGas: ReadonlyMap<string, OxidiserRow> = new Map(rows.map((row) => [row.gas, row]));
 
-/** The row of an oxidising gas, or undefined when the gas is not in the table. */
-export function oxidiserRow(gas: string): OxidiserRow | undefined {
-  return byGas.get(gas);
+/** Every gas of the table, in its order. */
+export const oxidisingGases: readonly string[] = [...byGas.keys()];
+
+/** The row of an oxidising gas with the laboratory's own Ci (`ci:chlorine`), or undefined when the gas is not in the table. */
+export function oxidiserRow(gas: string, values: LaboratoryValues): OxidiserRow | undefined {
+  const row = byGas.get(gas);
+  const own = row && ownFigure(values, 'ci', gas);
+  return own === undefined ? row : { gas, coefficient: own, trust: 'seen' };
 }

@@ -1,3 +1,6 @@
+import { ownFigure } from '../../values/value.ts';
+import type { LaboratoryValues } from '../../values/value.ts';
+
 /**
  * Toxic gases: LC50 (rat, 1 h) in µmol/mol, the figures that ISO 10298 and the
  * UN Model Regulations P200 use. Both are from memory. Primary values that were
@@ -37,14 +40,23 @@ const unknownLc50: ReadonlySet<string> = new Set([
   'methanol', 'formaldehyde', 'benzene', 'toluene', '1,3-butadiene', 'vinyl chloride', 'n-hexane',
 ]);
 
-/** Whether a gas is known to be harmful while the table has no LC50 for it. */
-export function lacksLc50(gas: string): boolean {
-  return unknownLc50.has(gas);
+/** Whether a gas is known to be harmful while neither the table nor the laboratory has an LC50 for it. */
+export function lacksLc50(gas: string, values: LaboratoryValues): boolean {
+  return unknownLc50.has(gas) && ownFigure(values, 'lc50', gas) === undefined;
 }
 
 const byGas: ReadonlyMap<string, ToxicRow> = new Map(rows.map((row) => [row.gas, row]));
 
-/** The row of a toxic gas, or undefined when the table does not name the gas. */
-export function toxicRow(gas: string): ToxicRow | undefined {
-  return byGas.get(gas);
+/** Every gas with an LC50, and those that harm without one, in the order of the table. */
+export const toxicGases: readonly string[] = [...byGas.keys(), ...unknownLc50];
+
+/**
+ * The row of a toxic gas with the laboratory's own LC50 (`lc50:ammonia`), or
+ * undefined when neither has a figure. An own figure for one of the gases
+ * without makes a row.
+ */
+export function toxicRow(gas: string, values: LaboratoryValues): ToxicRow | undefined {
+  const row = byGas.get(gas);
+  const own = row !== undefined || unknownLc50.has(gas) ? ownFigure(values, 'lc50', gas) : undefined;
+  return own === undefined ? row : { gas, lc50: own };
 }

@@ -2,12 +2,13 @@ import { formatTemperature } from '../../../units/index.ts';
 import { condensationWords as words } from '../../messages/hazards.ts';
 import type { StatePhase } from '../../phase/plan-phase.ts';
 import type { CylinderState, PlanStep, UncheckedPlan } from '../../plan/plan.ts';
-import { mayOverrule, nameOf, shareVerdict } from '../condensation-judgement.ts';
-import { condensationLimit } from '../condensation-limit.ts';
+import { cautionShare, nameOf } from '../condensation-judgement.ts';
 import type { Finding, FindingPlace } from '../finding.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showPressure } from '../show.ts';
+import { gaugeOfFinish, showPressure, showShare } from '../show.ts';
+import { judgeStepCondensation } from '../step-condensation.ts';
+import { valueIn } from '../../values/value.ts';
 
 const card: RuleCard = {
   id: 'condensation-at-step',
@@ -16,12 +17,6 @@ const card: RuleCard = {
   edition: 'rule from memory; margin of 70 % is common practice',
   trust: 'computed',
 };
-
-/**
- * A state with condensable gas and so small a compressibility factor is a
- * liquid stretched below its vapour pressure: gas on its dew line lies above.
- */
-const liquidBelow = 0.2;
 
 /** Each state of the fill at its own temperature: what is left, after every step, the finished gas. */
 export const condensationAtStep: HazardRule = { ...card, judge };
@@ -51,22 +46,17 @@ function separation(
 
 function judgeStep(plan: UncheckedPlan, { number, state, gauge }: PlanStep, tested: StatePhase): readonly Finding[] {
   const place = { kind: 'step', step: number } as const;
-  if (tested.phase === 'unstable') return separation(plan, state, tested, place, `at step ${number}`, gauge);
+  const judged = judgeStepCondensation(plan.job, plan.phase.guessedPairs, state, tested);
+  if (judged === null) return [];
+  if (judged.code === 'separates') return separation(plan, state, tested, place, `at step ${number}`, gauge);
   const at = formatTemperature(state.temperature);
-  const isTested = tested.phase !== 'not tested';
-  const rule = condensationLimit(plan.job.gases, state.fractions, state.temperature);
-  if (!rule.ok) {
-    if (rule.reason.code === 'no-condensable' || isTested) return [];
-    const text = words.stepNotComputed(number, at, rule.reason.code);
-    return [finding(card, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: NOT_COMPUTED, trust: 'from memory' })];
+  if (judged.code === 'not-computed') {
+    const text = words.stepNotComputed(number, at, judged.reason);
+    return [finding(card, { verdict: judged.verdict, place, words: text, figure: NOT_COMPUTED, limit: NOT_COMPUTED, trust: 'from memory' })];
   }
-  const { limit: allowed } = rule.value;
-  const liquid = state.compressibilityFactor < liquidBelow;
-  const byRule = liquid ? 'hold' : shareVerdict(state.pressure, allowed);
-  if (byRule === 'note') return [];
   const figure = showPressure(plan, state.pressure, gauge);
-  const limit = showPressure(plan, allowed, gauge);
-  const excused = byRule === 'hold' && !liquid && isTested && mayOverrule(plan, state, rule.value);
-  const text = excused ? words.stepAboveRule : byRule === 'hold' ? words.stepCondenses : words.stepNear;
-  return [finding(card, { verdict: excused ? 'caution' : byRule, place, words: text(number, figure, limit, at), figure, limit, trust: 'from memory' })];
+  const limit = showPressure(plan, judged.allowed, gauge);
+  const text = { excused: words.stepAboveRule, condenses: words.stepCondenses, near: words.stepNear }[judged.code];
+  const share = showShare(valueIn(plan.job.values, cautionShare));
+  return [finding(card, { verdict: judged.verdict, place, words: text(number, figure, limit, at, share), figure, limit, trust: 'from memory' })];
 }

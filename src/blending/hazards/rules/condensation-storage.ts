@@ -1,7 +1,8 @@
 import { formatTemperature, kelvin, pascal } from '../../../units/index.ts';
 import type { Kelvin } from '../../../units/index.ts';
-import { condensationWords as words } from '../../messages/hazards.ts';
-import { COLDER_BY } from '../../phase/plan-phase.ts';
+import { condensationWords } from '../../messages/hazards.ts';
+import { storageWords as words } from '../../messages/later-hazards.ts';
+import { colderBy } from '../../phase/plan-phase.ts';
 import type { ColdestPhase } from '../../phase/plan-phase.ts';
 import type { LargestFill } from '../../phase/largest-fill.ts';
 import { cautionShare, mayOverrule, nameOf, shareVerdict } from '../condensation-judgement.ts';
@@ -11,7 +12,8 @@ import type { Finding } from '../finding.ts';
 import { exceeds } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { FindingParts, HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showPressure } from '../show.ts';
+import { gaugeOfFinish, showPressure, showShare } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
 
 const card: RuleCard = {
   id: 'condensation-in-storage',
@@ -45,7 +47,8 @@ function one(parts: Omit<FindingParts, 'place'>): readonly Finding[] {
 /** The dew point judges; the rule may raise its verdict, and keeps its own where the model is not backed by measurements. */
 function byDewPoint(context: HazardContext, coldest: Kelvin, phase: ColdestPhase, largest: LargestFill | null): readonly Finding[] {
   const { plan } = context;
-  const { finished } = plan;
+  const { finished, job: { values } } = plan;
+  const share = valueIn(values, cautionShare);
   const gauge = gaugeOfFinish(plan);
   const at = formatTemperature(coldest);
   const rule = condensationLimit(plan.job.gases, finished.fractions, coldest);
@@ -53,21 +56,21 @@ function byDewPoint(context: HazardContext, coldest: Kelvin, phase: ColdestPhase
   const exceeded = ruleFill !== null && exceeds(finished.pressure, ruleFill.limit);
   const beside = { limit: ruleFill === null ? null : showPressure(plan, ruleFill.limit, gauge), exceeded };
   const figure = showPressure(plan, finished.pressure, gauge);
-  const forming = largest === null ? '' : words.formingName(nameOf(largest.forming.gas), largest.forming.ice);
+  const forming = largest === null ? '' : condensationWords.formingName(nameOf(largest.forming.gas), largest.forming.ice);
   const limit = largest === null ? beside.limit ?? 'none found' : showPressure(plan, largest.pressure, gauge);
 
   if (largest !== null && exceeds(finished.pressure, largest.pressure)) {
     return one({ verdict: 'hold', words: words.storageDew(figure, limit, at, forming, beside, largest.mayFreeze), figure, limit });
   }
-  if (ruleFill !== null && finished.pressure > cautionShare * ruleFill.limit && !mayOverrule(plan, finished, ruleFill)) return byRule(context, coldest);
+  if (ruleFill !== null && finished.pressure > share * ruleFill.limit && !mayOverrule(plan, finished, ruleFill)) return byRule(context, coldest);
   if (exceeded) {
     const ruleText = beside.limit ?? NOT_COMPUTED;
     return one({ verdict: 'caution', words: words.storageRuleOnly(figure, ruleText, at), figure, limit: ruleText });
   }
-  if (largest !== null && (largest.mayFreeze || finished.pressure > cautionShare * largest.pressure)) {
-    return one({ verdict: 'caution', words: words.storageDewNear(figure, limit, at, forming, beside, largest.mayFreeze), figure, limit });
+  if (largest !== null && (largest.mayFreeze || finished.pressure > share * largest.pressure)) {
+    return one({ verdict: 'caution', words: words.storageDewNear(figure, limit, at, forming, beside, largest.mayFreeze, showShare(share)), figure, limit });
   }
-  const colder = formatTemperature(kelvin(coldest - COLDER_BY));
+  const colder = formatTemperature(kelvin(coldest - valueIn(values, colderBy)));
   const { slightlyColder } = phase;
   if (slightlyColder.phase === 'unstable') {
     return one({ verdict: 'caution', words: words.storageSlightlyColder(figure, at, colder, beside), figure, limit });
@@ -108,8 +111,8 @@ function byRule({ plan, tools }: HazardContext, coldest: Kelvin): readonly Findi
   const judged = pascal(Math.max(pressure.value, scaled));
   const figure = showPressure(plan, judged, gauge);
   const limit = showPressure(plan, rule.value.limit, gauge);
-  const verdict = shareVerdict(judged, rule.value.limit);
-  const text = { hold: words.storageCondenses, caution: words.storageNear, note: words.storageBelow }[verdict](figure, limit, at);
+  const verdict = shareVerdict(judged, rule.value.limit, plan.job.values);
+  const text = { hold: words.storageCondenses, caution: words.storageNear, note: words.storageBelow }[verdict](figure, limit, at, showShare(valueIn(plan.job.values, cautionShare)));
   return one({ verdict, words: text, figure, limit, trust });
 }
 

@@ -1,4 +1,4 @@
-import { compositionWords as words } from '../../messages/hazards.ts';
+import { contentsWords as words } from '../../messages/hazards.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardRule, RuleCard } from '../rule.ts';
 

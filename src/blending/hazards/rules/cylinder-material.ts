@@ -1,9 +1,11 @@
 import { pascal } from '../../../units/index.ts';
-import { materialWords as words } from '../../messages/hazards.ts';
+import { materialWords as words } from '../../messages/later-hazards.ts';
 import type { Finding } from '../finding.ts';
 import { finding } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
 import { gaugeOfFinish, showFraction, showPressure } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
+import type { RuleValue } from '../../values/value.ts';
 
 const card: RuleCard = {
   id: 'cylinder-material',
@@ -13,20 +15,21 @@ const card: RuleCard = {
   trust: 'common practice, no source',
 };
 
-/** Hydrogen partial pressure (absolute, Pa) from which the strength of the steel matters. */
-const hydrogenPartial = 50e5;
+/** Hydrogen partial pressure (bar absolute) from which the strength of the steel matters. */
+export const hydrogenPartial: RuleValue = { id: 'hydrogen-in-steel', value: 50 };
 /** Contents up to this are impurities, too little to be worth a finding (own choice). */
-const impurity = 1e-6;
+export const steelImpurity: RuleValue = { id: 'steel-impurity', value: 1e-6 };
 
 /** Gases that attack steel. A cylinder of unknown material is judged as steel. */
 export const cylinderMaterial: HazardRule = { ...card, judge };
 
 function judge({ plan }: HazardContext): readonly Finding[] {
-  const { material } = plan.job.cylinder;
+  const { values, cylinder: { material } } = plan.job;
   if (material === 'aluminium') return [];
   const stated = material === 'steel';
   const place = { kind: 'cylinder' } as const;
   const content = (gas: string): number => plan.finished.fractions[(plan.job.gases as readonly string[]).indexOf(gas)] ?? 0;
+  const impurity = valueIn(values, steelImpurity);
   const findings: Finding[] = [];
   for (const [gas, text] of [
     ['carbon monoxide', words.carbonMonoxideInSteel],
@@ -38,16 +41,18 @@ function judge({ plan }: HazardContext): readonly Finding[] {
   }
   if (content('hydrogen') > impurity) {
     const partial = pascal(content('hydrogen') * plan.finished.pressure);
-    const much = partial > hydrogenPartial;
+    const from = pascal(valueIn(values, hydrogenPartial) * 1e5);
+    const much = partial > from;
     const gauge = gaugeOfFinish(plan);
     const figure = showPressure(plan, partial, gauge, { reference: 'absolute' });
+    const limit = showPressure(plan, from, gauge, { reference: 'absolute' });
     findings.push(finding(card, {
       verdict: much ? 'caution' : 'note',
       place,
       about: 'hydrogen',
-      words: (much ? words.hydrogenInSteel : words.littleHydrogenInSteel)(figure, stated),
+      words: much ? words.hydrogenInSteel(figure, limit, stated) : words.littleHydrogenInSteel(figure, stated),
       figure,
-      limit: showPressure(plan, pascal(hydrogenPartial), gauge, { reference: 'absolute' }),
+      limit,
     }));
   }
   return findings;

@@ -2,13 +2,16 @@ import { pascal } from '../../../units/index.ts';
 import type { Pascal } from '../../../units/index.ts';
 import { togetherWords as words } from '../../messages/hazards.ts';
 import type { UncheckedPlan } from '../../plan/plan.ts';
-import type { Finding, FindingPlace, Verdict } from '../finding.ts';
-import { classifyTogether, fuelOxidiserScale, limitingOxygen, pointOf, pressureAllowance, together } from '../fuel-and-oxidiser.ts';
-import type { FuelOxidiserPoint, FuelOxidiserScale, LimitingOxygen, TogetherClass } from '../fuel-and-oxidiser.ts';
+import type { Finding, FindingPlace } from '../finding.ts';
+import { allowance, classifyTogether, fuelOxidiserScale, limitingOxygen, pointOf, pressureAllowance, together } from '../fuel-and-oxidiser.ts';
+import type { FuelOxidiserPoint, FuelOxidiserScale, LimitingOxygen } from '../fuel-and-oxidiser.ts';
 import { usedParents } from '../plan-parts.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showFraction, showPercent, showPressure } from '../show.ts';
+import { gaugeOfFinish, showFraction, showPercent, showPressure, showShare, showStated } from '../show.ts';
+import { judgeParentMixture, togetherVerdicts } from '../together-judgement.ts';
+import { valueIn } from '../../values/value.ts';
+import type { LaboratoryValues, RuleValue } from '../../values/value.ts';
 import { worstCase } from '../worst-case.ts';
 
 const card: RuleCard = {
@@ -25,6 +28,9 @@ const card: RuleCard = {
  */
 export const fuelWithOxidiser: HazardRule = { ...card, judge };
 
+/** A parent without a stated pressure is taken as being at cylinder pressure, bar absolute (own choice). */
+export const unstatedParent: RuleValue = { id: 'unstated-parent-pressure', value: 200 };
+
 /** One mixture to judge. */
 interface Candidate {
   readonly place: FindingPlace;
@@ -35,10 +41,8 @@ interface Candidate {
   readonly gauge: string | null;
 }
 
-const verdicts: Readonly<Record<Exclude<TogetherClass, 'none'>, Verdict>> = { trace: 'note', lean: 'caution', hold: 'hold' };
-
 function judge({ plan }: HazardContext): readonly Finding[] {
-  const scale = fuelOxidiserScale(plan.job.gases);
+  const scale = fuelOxidiserScale(plan.job.gases, plan.job.values);
   if (!scale.ok) {
     // Counts as a hold: a fill that may hold fuel with oxidiser was not judged at all.
     const text = words.togetherNotComputed(scale.reason.gas);
@@ -74,55 +78,58 @@ function candidates(plan: UncheckedPlan, scale: FuelOxidiserScale): readonly Can
 }
 
 function judgeState(plan: UncheckedPlan, { place, where, point, limit, pressure, gauge }: Candidate): readonly Finding[] {
-  const judged = classifyTogether(point, limit, pressure);
+  const { values } = plan.job;
+  const judged = classifyTogether(point, limit, pressure, values);
   if (judged === 'none') return [];
   const fuel = showPercent(point.fuelOfLfl);
   const oxygen = showFraction(point.oxygen);
   const shownPressure = showPressure(plan, pressure, gauge);
-  const more = remarks(limit, pressure);
+  const more = remarks(limit, pressure, values);
   const text = {
-    trace: () => words.togetherTrace(where, fuel, oxygen),
+    trace: () => words.togetherTrace(where, fuel, oxygen, showShare(valueIn(values, together.traceShare))),
     lean: () => words.togetherLean(where, fuel, oxygen, shownPressure, more),
-    hold: () => words.togetherHold(where, fuel, oxygen, shownPressure, more),
+    hold: () => words.togetherHold(where, fuel, oxygen, shownPressure, more, showShare(valueIn(values, together.fuelShare))),
   }[judged]();
   return [finding(card, {
-    verdict: verdicts[judged],
+    verdict: togetherVerdicts[judged],
     place,
     words: text,
     figure: `fuel ${fuel} of its lower flammable limit, oxygen ${oxygen}`,
-    limit: shownLimit(limit, pressure),
+    limit: shownLimit(limit, pressure, values),
   })];
 }
 
-/** A parent that holds both is somebody's finished gas: held only when it could burn as it is. */
+/** Each parent as it stands in its own cylinder. */
 function judgeParents(plan: UncheckedPlan, scale: FuelOxidiserScale): readonly Finding[] {
+  const { values } = plan.job;
   return usedParents(plan).flatMap((parent) => {
     const point = pointOf(scale, parent.fractions);
     const limit = limitingOxygen(scale, [parent.fractions]);
-    // A parent without a stated pressure is taken as being at cylinder pressure.
-    const pressure = parent.pressure ?? pascal(200e5);
-    const judged = classifyTogether(point, limit, pressure);
-    if (judged === 'none' || judged === 'trace') return [];
-    const burns = point.fuelOfLfl >= 1 && judged === 'hold';
+    const pressure = parent.pressure ?? pascal(valueIn(values, unstatedParent) * 1e5);
+    const verdict = judgeParentMixture({ point, limit }, pressure, values);
+    if (verdict === null) return [];
     const fuel = showPercent(point.fuelOfLfl);
     const oxygen = showFraction(point.oxygen);
     return [finding(card, {
-      verdict: burns ? 'hold' : 'caution',
+      verdict,
       place: { kind: 'parent', parent: parent.key },
-      words: words.parentMixture(parent.name, fuel, oxygen, burns),
+      words: words.parentMixture(parent.name, fuel, oxygen, verdict === 'hold'),
       figure: `fuel ${fuel} of its lower flammable limit, oxygen ${oxygen}`,
-      limit: shownLimit(limit, pressure),
+      limit: shownLimit(limit, pressure, values),
     })];
   });
 }
 
-function shownLimit(limit: LimitingOxygen, pressure: Pascal): string {
-  const oxygen = together.oxygenShare * limit.fraction * pressureAllowance(pressure);
-  return `fuel ${showPercent(together.fuelShare, 0)} of its lower flammable limit with oxygen ${showFraction(oxygen)}`;
+function shownLimit(limit: LimitingOxygen, pressure: Pascal, values: LaboratoryValues): string {
+  const oxygen = valueIn(values, together.oxygenShare) * limit.fraction * pressureAllowance(pressure, values);
+  return `fuel ${showShare(valueIn(values, together.fuelShare))} of its lower flammable limit with oxygen ${showFraction(oxygen)}`;
 }
 
-function remarks(limit: LimitingOxygen, pressure: Pascal): string {
-  const half = pressureAllowance(pressure) < 1 ? ' Above 10 bar absolute only half of the published limiting oxygen concentration is relied on.' : '';
+function remarks(limit: LimitingOxygen, pressure: Pascal, values: LaboratoryValues): string {
+  const share = pressureAllowance(pressure, values);
+  const relied = share === allowance.share.value ? 'half' : showShare(share);
+  const half = share < 1
+    ? ` Above ${showStated(valueIn(values, allowance.from))} bar absolute only ${relied} of the published limiting oxygen concentration is relied on.` : '';
   const missing = limit.standIn ? ' A limiting oxygen concentration is missing; the lowest of the table stands in for it.' : '';
   return `${half}${missing}`;
 }

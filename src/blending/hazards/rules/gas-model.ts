@@ -1,10 +1,13 @@
 import { formatNumber } from '../../../units/index.ts';
 import type { RangeVerdict } from '../../../thermo/index.ts';
-import { compositionWords as words } from '../../messages/hazards.ts';
+import { compositionWords as words } from '../../messages/later-hazards.ts';
 import type { UncheckedPlan } from '../../plan/plan.ts';
 import type { Finding, FindingPlace } from '../finding.ts';
 import { finding } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
+import { showShare } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
+import type { RuleValue } from '../../values/value.ts';
 
 const rangeCard: RuleCard = {
   id: 'model-range',
@@ -39,9 +42,9 @@ const pairingCard: RuleCard = {
 };
 
 /** Content of both gases above which an estimated pair is worth a caution (own choice). */
-const matters = 0.01;
+export const pairMatters: RuleValue = { id: 'estimated-pair-content', value: 0.01 };
 /** Content of either gas up to which a pair cannot move a stop (own choice). */
-const immaterial = 1e-5;
+export const pairImmaterial: RuleValue = { id: 'estimated-pair-trace', value: 1e-5 };
 /** So many pairs are named; a long list would hide the rest. */
 const namedPairs = 4;
 
@@ -60,11 +63,12 @@ export const nitrogenDioxidePairs: HazardRule = { ...pairingCard, judge: judgePa
 function judgeCubic({ plan }: HazardContext): readonly Finding[] {
   const content = (gas: string): number => plan.finished.fractions[(plan.job.gases as readonly string[]).indexOf(gas)] ?? 0;
   if (plan.cubicGases.length === 0) return [];
+  const matters = valueIn(plan.job.values, pairMatters);
   const important = plan.cubicGases.some((gas) => content(gas) > matters);
   return [finding(cubicCard, {
     verdict: important ? 'caution' : 'note',
     place: { kind: 'finished gas' },
-    words: words.cubicGas(plan.cubicGases.join(', '), important),
+    words: words.cubicGas(plan.cubicGases.join(', '), important, showShare(matters)),
     figure: `${formatNumber(plan.modelUncertainty * 100, 2)} % of pressure, standard uncertainty of the model`,
     limit: 'a reference equation',
   })];
@@ -99,12 +103,15 @@ function judgeRange({ plan }: HazardContext): readonly Finding[] {
 function judgePairs({ plan }: HazardContext): readonly Finding[] {
   const content = (gas: string): number => plan.finished.fractions[(plan.job.gases as readonly string[]).indexOf(gas)] ?? 0;
   const smaller = ([a, b]: UncheckedPlan['estimatedPairs'][number]): number => Math.min(content(a), content(b));
+  const { values } = plan.job;
+  const matters = valueIn(values, pairMatters);
+  const immaterial = valueIn(values, pairImmaterial);
   const important = plan.estimatedPairs.filter((pair) => smaller(pair) > matters);
   const minor = plan.estimatedPairs.filter((pair) => smaller(pair) > immaterial && smaller(pair) <= matters);
-  return [...pairFinding(important, true), ...pairFinding(minor, false)];
+  return [...pairFinding(important, true, showShare(matters)), ...pairFinding(minor, false, showShare(matters))];
 }
 
-function pairFinding(pairs: UncheckedPlan['estimatedPairs'], important: boolean): readonly Finding[] {
+function pairFinding(pairs: UncheckedPlan['estimatedPairs'], important: boolean, from: string): readonly Finding[] {
   if (pairs.length === 0) return [];
   const named = pairs.slice(0, namedPairs).map(([a, b]) => `${a} with ${b}`).join(', ');
   const list = pairs.length > namedPairs ? `${named} and ${pairs.length - namedPairs} more` : named;
@@ -112,7 +119,7 @@ function pairFinding(pairs: UncheckedPlan['estimatedPairs'], important: boolean)
     verdict: important ? 'caution' : 'note',
     place: { kind: 'finished gas' },
     about: important ? 'main' : 'minor',
-    words: words.estimatedPairs(list, important),
+    words: words.estimatedPairs(list, important, from),
     figure: `${pairs.length} estimated`,
     limit: 'all pairs fitted',
   })];

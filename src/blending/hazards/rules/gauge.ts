@@ -2,11 +2,11 @@ import { instrumentWords as words } from '../../messages/hazards.ts';
 import type { UncheckedPlan } from '../../plan/plan.ts';
 import type { JobGauge } from '../../recipe/job.ts';
 import type { Finding } from '../finding.ts';
+import { judgeGauge } from '../gauge-judgement.ts';
 import { exceeds } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
 import { showPercent, showPressure } from '../show.ts';
-import { balanceUncertainty, gaugeUncertainty, judgeResolution } from '../step-resolution.ts';
 
 const coarseCard: RuleCard = {
   id: 'gauge-too-coarse',
@@ -39,18 +39,16 @@ function judgeCoarse({ plan }: HazardContext): readonly Finding[] {
       const text = words.noGauge(step.number, showPressure(plan, step.state.pressure, null));
       return [finding(coarseCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: 'no gauge' })];
     }
-    const relative = gaugeUncertainty(gauge) / Math.abs(step.rise);
-    const judged = judgeResolution(plan, step, relative);
-    if (judged.verdict === 'note') return [];
+    const { verdict, code, relative, limit } = judgeGauge(
+      plan.job, gauge, { parent: step.parent, stop: step.state.pressure, rise: step.rise, mass: step.mass },
+    );
+    if (verdict === 'note') return [];
     const figure = showPercent(relative);
-    const byBalance = plan.job.by === 'pressure and mass'
-      && judgeResolution(plan, step, balanceUncertainty(plan) / step.mass).verdict === 'note';
-    if (byBalance) {
-      const text = words.gaugeCoarseButWeighed(step.number, gauge.name, figure);
-      return [finding(coarseCard, { verdict: 'caution', place, words: text, figure, limit: showPercent(judged.limit) })];
-    }
-    const text = (judged.verdict === 'hold' ? words.gaugeCannotMeet : words.gaugeCoarse)(step.number, gauge.name, figure, showPercent(judged.limit));
-    return [finding(coarseCard, { verdict: judged.verdict, place, words: text, figure, limit: showPercent(judged.limit) })];
+    const shownLimit = showPercent(limit);
+    const text = code === 'coarse-but-weighed'
+      ? words.gaugeCoarseButWeighed(step.number, gauge.name, figure)
+      : (code === 'cannot-meet' ? words.gaugeCannotMeet : words.gaugeCoarse)(step.number, gauge.name, figure, shownLimit);
+    return [finding(coarseCard, { verdict, place, words: text, figure, limit: shownLimit })];
   });
 }
 

@@ -1,4 +1,4 @@
-import { classWords as words } from '../../messages/hazards.ts';
+import { classWords as words } from '../../messages/later-hazards.ts';
 import { assumptions } from '../../messages/hazards/classification.ts';
 import type { Finding } from '../finding.ts';
 import { fuelOxidiserScale, pointOf, together } from '../fuel-and-oxidiser.ts';
@@ -6,9 +6,10 @@ import { evaluateRatio } from '../gas-ratio.ts';
 import { oxidisingAbovePercent, oxidisingPowerRatio } from '../iso10156.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { FindingWords, HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { showPercent } from '../show.ts';
+import { showPercent, showShare } from '../show.ts';
 import { standInsOf } from '../stand-ins.ts';
-import { worstCase } from '../worst-case.ts';
+import { valueIn } from '../../values/value.ts';
+import { assumedTolerance, worstCase } from '../worst-case.ts';
 import { oxidiserTrace } from './flammable-gas.ts';
 
 const card: RuleCard = {
@@ -23,27 +24,27 @@ const card: RuleCard = {
 export const oxidisingGas: HazardRule = { ...card, judge };
 
 function judge({ plan }: HazardContext): readonly Finding[] {
-  const { gases } = plan.job;
+  const { gases, values } = plan.job;
   const x = plan.finished.fractions;
-  const threshold = oxidisingAbovePercent / 100;
-  const limit = showPercent(threshold);
-  const tabulated = oxidisingPowerRatio(gases, 'tabulated');
-  const cautious = oxidisingPowerRatio(gases, 'cautious');
-  const scale = fuelOxidiserScale(gases);
+  const threshold = valueIn(values, oxidisingAbovePercent) / 100;
+  const limit = showShare(threshold);
+  const tabulated = oxidisingPowerRatio(gases, 'tabulated', values);
+  const cautious = oxidisingPowerRatio(gases, 'cautious', values);
+  const scale = fuelOxidiserScale(gases, values);
   const answer = (verdict: Finding['verdict'], text: FindingWords, figure: string, remembered = false): readonly Finding[] =>
     [finding(card, { verdict, place: { kind: 'finished gas' }, words: text, figure, limit, ...(remembered ? { trust: 'from memory' as const } : {}) })];
   if (!tabulated.ok) return answer('caution', words.classNotComputed('Oxidising power', tabulated.reason.code), NOT_COMPUTED);
-  if (!cautious.ok || !scale.ok || pointOf(scale.value, x).oxygen <= oxidiserTrace) return [];
+  if (!cautious.ok || !scale.ok || pointOf(scale.value, x).oxygen <= valueIn(values, oxidiserTrace)) return [];
   const nominal = evaluateRatio(tabulated.value, x);
   const worst = worstCase(plan, cautious.value);
-  const standIns = standInsOf(gases, x, ['oxidiser', 'inert']);
-  const assumed = assumptions(standIns, worst.toleranceAssumed);
+  const standIns = standInsOf(gases, x, ['oxidiser', 'inert'], values);
+  const assumed = assumptions(standIns, worst.toleranceAssumed ? showShare(valueIn(values, assumedTolerance)) : null);
   const [shownNominal, shownWorst] = [showPercent(nominal), showPercent(worst.value)];
   const figure = `${shownNominal} as planned, ${shownWorst} at worst`;
-  if (worstCase(plan, scale.value.fuel).value >= together.fuelShare) {
+  if (worstCase(plan, scale.value.fuel).value >= valueIn(values, together.fuelShare)) {
     return answer('caution', words.outsideOxidisingTest(shownNominal), NOT_COMPUTED);
   }
   return worst.value > threshold * (1 + 1e-9)
-    ? answer('caution', words.oxidising(shownNominal, shownWorst, assumed), figure, standIns.length > 0)
-    : answer('note', words.notOxidising(shownNominal, shownWorst, assumed), figure, standIns.length > 0);
+    ? answer('caution', words.oxidising(shownNominal, shownWorst, limit, assumed), figure, standIns.length > 0)
+    : answer('note', words.notOxidising(shownNominal, shownWorst, limit, assumed), figure, standIns.length > 0);
 }

@@ -1,5 +1,5 @@
 import { formatNumber, formatTemperature, toPascal } from '../../../units/index.ts';
-import { oxygenWords as words } from '../../messages/hazards.ts';
+import { oxygenWords as words } from '../../messages/later-hazards.ts';
 import type { JobParent } from '../../recipe/job.ts';
 import type { Finding } from '../finding.ts';
 import { evaluateRatio } from '../gas-ratio.ts';
@@ -9,7 +9,9 @@ import { usedParents } from '../plan-parts.ts';
 import { exceeds } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { showPressure } from '../show.ts';
+import { showPressure, showStated } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
+import type { RuleValue } from '../../values/value.ts';
 
 const card: RuleCard = {
   id: 'oxygen-compression-heat',
@@ -19,20 +21,26 @@ const card: RuleCard = {
   trust: 'seen',
 };
 
+/** Supply pressure above which slow-opening valves are asked for, psi gauge. */
+export const slowOpeningAbove: RuleValue = { id: 'slow-opening-above', value: 125 };
+
 /** Temperature a line could reach when an oxygen-enriched parent is opened quickly onto it. */
 export const oxygenCompressionHeat: HazardRule = { ...card, judge };
 
 function judge({ plan }: HazardContext): readonly Finding[] {
-  const power = oxidisingPowerRatio(plan.job.gases, 'cautious');
+  const { values } = plan.job;
+  const enrichedAbove = valueIn(values, oxidisingAbovePercent);
+  const power = oxidisingPowerRatio(plan.job.gases, 'cautious', values);
   // A gas without coefficients is reported by `oxygen-enriched`; the rest can still be judged by content.
   const oxygen = plan.job.gases.indexOf('oxygen');
   const enriched = (parent: JobParent): boolean => {
     const content = parent.fractions[oxygen] ?? 0;
     const level = power.ok ? Math.max(content, evaluateRatio(power.value, parent.fractions)) : content;
-    return level * 100 > oxidisingAbovePercent;
+    return level * 100 > enrichedAbove;
   };
   const { barometer, roomTemperature } = plan.job.conditions;
-  const slowOpening = toPascal(125, 'psi') + barometer;
+  const slowFrom = valueIn(values, slowOpeningAbove);
+  const slowOpening = toPascal(slowFrom, 'psi') + barometer;
   return usedParents(plan).filter(enriched).map((parent) => {
     const place = { kind: 'parent', parent: parent.key } as const;
     const gauge = plan.steps.findLast((step) => step.parent === parent.key)?.gauge ?? null;
@@ -41,9 +49,10 @@ function judge({ plan }: HazardContext): readonly Finding[] {
       return finding(card, { verdict: 'caution', place, words: words.compressionHeatNotComputed(parent.name), figure: NOT_COMPUTED, limit });
     }
     const ratio = parent.pressure / barometer;
-    const figure = formatTemperature(adiabaticTemperature(roomTemperature, ratio), 0);
+    const figure = formatTemperature(adiabaticTemperature(roomTemperature, ratio, values), 0);
     const high = exceeds(parent.pressure, slowOpening);
-    const text = (high ? words.compressionHeat : words.compressionHeatLow)(parent.name, formatNumber(ratio, 0), figure, formatTemperature(roomTemperature));
+    const said = [parent.name, formatNumber(ratio, 0), figure, formatTemperature(roomTemperature)] as const;
+    const text = high ? words.compressionHeat(...said) : words.compressionHeatLow(...said, `${showStated(slowFrom)} psi gauge`);
     return finding(card, { verdict: high ? 'caution' : 'note', place, words: text, figure, limit });
   });
 }

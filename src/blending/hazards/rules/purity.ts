@@ -1,9 +1,11 @@
-import { compositionWords as words } from '../../messages/hazards.ts';
+import { compositionWords as words } from '../../messages/later-hazards.ts';
 import type { Finding } from '../finding.ts';
 import { usedParents } from '../plan-parts.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
 import { showFraction } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
+import type { RuleValue } from '../../values/value.ts';
 
 const gasCard: RuleCard = {
   id: 'unordered-gas',
@@ -22,8 +24,10 @@ const purityCard: RuleCard = {
 };
 
 /** A gas not ordered counts above this content, or above this share of the smallest ordered one. */
-const absolute = 1e-3;
-const ofSmallest = 0.01;
+export const unorderedAbove = {
+  content: { id: 'unordered-content', value: 1e-3 },
+  ofSmallest: { id: 'unordered-share', value: 0.01 },
+} as const satisfies Record<string, RuleValue>;
 
 /** What a residual or an impurity brings beyond the order. */
 export const unorderedGas: HazardRule = { ...gasCard, judge: judgeGases };
@@ -46,7 +50,8 @@ export const purityNotStated: HazardRule = {
 function judgeGases({ plan }: HazardContext): readonly Finding[] {
   const minors = plan.job.order.components.filter((component) => !component.isBalance && component.nominal > 0);
   const smallest = Math.min(...minors.map((component) => component.nominal), 1);
-  const limit = Math.min(absolute, ofSmallest * smallest);
+  const { values } = plan.job;
+  const limit = Math.min(valueIn(values, unorderedAbove.content), valueIn(values, unorderedAbove.ofSmallest) * smallest);
   return plan.final.components.flatMap(({ gas, nominal, planned }) => {
     if (nominal !== null || !(planned > limit)) return [];
     const figure = showFraction(planned);

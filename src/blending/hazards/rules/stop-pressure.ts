@@ -3,10 +3,10 @@ import type { Kelvin, Pascal } from '../../../units/index.ts';
 import { pressureWords as words } from '../../messages/hazards.ts';
 import type { PlanStep } from '../../plan/plan.ts';
 import type { Finding } from '../finding.ts';
-import { exceeds } from '../pressure-limits.ts';
 import { finding } from '../rule.ts';
-import type { FindingWords, HazardContext, HazardRule, RuleCard } from '../rule.ts';
+import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
 import { showAgainst } from '../show.ts';
+import { judgeStop } from '../stop-judgement.ts';
 
 const card: RuleCard = {
   id: 'stop-above-working-pressure',
@@ -26,21 +26,18 @@ export const stopAboveWorkingPressure: HazardRule = { ...card, judge };
 function judge(context: HazardContext): readonly Finding[] {
   const { workingPressure: limit, workingPressureTemperature: marked } = context.plan.job.cylinder;
   if (limit === null) return [];
-  return context.plan.steps
-    .filter((step) => exceeds(step.state.pressure, limit))
-    .map((step) => judgeStop(context, step, limit, marked));
+  return context.plan.steps.flatMap((step) => judgeStep(context, step, limit, marked));
 }
 
-function judgeStop({ plan, tools }: HazardContext, step: PlanStep, limit: Pascal, marked: Kelvin): Finding {
+function judgeStep({ plan, tools }: HazardContext, step: PlanStep, limit: Pascal, marked: Kelvin): readonly Finding[] {
+  const judged = judgeStop(step.state, limit, marked, () => tools.stepPressureAt(step.number, marked));
+  if (judged === null) return [];
   const at = formatTemperature(marked);
   const { figure, limit: shownLimit } = showAgainst(plan, step.state.pressure, limit, step.gauge);
-  const answer = (verdict: Finding['verdict'], text: FindingWords): Finding =>
-    finding(card, { verdict, place: { kind: 'step', step: step.number }, words: text, figure, limit: shownLimit });
-  const overfilled = words.stopAboveWorkingPressure(step.number, figure, shownLimit, at);
-  if (step.state.temperature <= marked) return answer('hold', overfilled);
-  const pressure = tools.stepPressureAt(step.number, marked);
-  if (!pressure.ok) return answer('hold', words.stopNotJudged(step.number, figure, pressure.reason.code));
-  return exceeds(pressure.value, limit)
-    ? answer('hold', overfilled)
-    : answer('caution', words.stopAboveWorkingPressureWarm(step.number, figure, shownLimit, at));
+  const text = {
+    overfilled: () => words.stopAboveWorkingPressure(step.number, figure, shownLimit, at),
+    warm: () => words.stopAboveWorkingPressureWarm(step.number, figure, shownLimit, at),
+    'not-computed': () => words.stopNotJudged(step.number, figure, judged.code === 'not-computed' ? judged.reason : ''),
+  }[judged.code]();
+  return [finding(card, { verdict: judged.verdict, place: { kind: 'step', step: step.number }, words: text, figure, limit: shownLimit })];
 }

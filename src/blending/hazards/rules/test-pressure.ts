@@ -1,9 +1,13 @@
-import { pressureWords as words } from '../../messages/hazards.ts';
+import { formatTemperature } from '../../../units/index.ts';
+import { pressureWords } from '../../messages/hazards.ts';
+import { hotWords as words } from '../../messages/later-hazards.ts';
 import type { Finding } from '../finding.ts';
 import { celsiusToKelvin, developedPressure, exceeds, gaugeShare } from '../pressure-limits.ts';
 import { finding, NOT_COMPUTED } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { gaugeOfFinish, showAgainst, showPressure } from '../show.ts';
+import { gaugeOfFinish, showAgainst, showPressure, showShare } from '../show.ts';
+import { valueIn } from '../../values/value.ts';
+import type { RuleValue } from '../../values/value.ts';
 
 const developedCard: RuleCard = {
   id: 'test-pressure',
@@ -21,6 +25,13 @@ const settledCard: RuleCard = {
   trust: 'from memory',
 };
 
+/** °C at which the closed cylinder is looked at, and the share of the test pressure. */
+export const underTest = {
+  hot: { id: 'test-pressure-at', value: 65 },
+  settled: { id: 'settled-pressure-at', value: 15 },
+  share: { id: 'settled-share-of-test-pressure', value: 2 / 3 },
+} as const satisfies Record<string, RuleValue>;
+
 const place = { kind: 'cylinder' } as const;
 
 /** The finished cylinder heated to 65 °C must not develop more than its test pressure. */
@@ -32,14 +43,16 @@ export const twoThirdsOfTestPressure: HazardRule = { ...settledCard, judge: judg
 function judgeDeveloped(context: HazardContext): readonly Finding[] {
   const { plan } = context;
   const limit = plan.job.cylinder.testPressure;
+  const temperature = celsiusToKelvin(valueIn(plan.job.values, underTest.hot));
+  const at = formatTemperature(temperature);
   if (limit === null) {
-    return [finding(developedCard, { verdict: 'caution', place, words: words.testPressureNotStated(), figure: NOT_COMPUTED, limit: 'not stated' })];
+    return [finding(developedCard, { verdict: 'caution', place, words: words.testPressureNotStated(at), figure: NOT_COMPUTED, limit: 'not stated' })];
   }
   const gauge = gaugeOfFinish(plan);
   const shownLimit = showPressure(plan, limit, gauge);
-  const pressure = developedPressure(context, celsiusToKelvin(65));
+  const pressure = developedPressure(context, temperature);
   if (!pressure.ok) {
-    const text = words.pressureNotComputed('Pressure', '65 °C', pressure.reason.code);
+    const text = pressureWords.pressureNotComputed('Pressure', at, pressure.reason.code);
     return [finding(developedCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
   const shown = showAgainst(plan, pressure.value, limit, gauge);
@@ -47,7 +60,7 @@ function judgeDeveloped(context: HazardContext): readonly Finding[] {
   return [finding(developedCard, {
     verdict: above ? 'hold' : 'note',
     place,
-    words: (above ? words.aboveTestPressure : words.withinTestPressure)(shown.figure, shown.limit),
+    words: (above ? words.aboveTestPressure : words.withinTestPressure)(shown.figure, shown.limit, at),
     ...shown,
   })];
 }
@@ -57,14 +70,18 @@ function judgeSettled(context: HazardContext): readonly Finding[] {
   const test = plan.job.cylinder.testPressure;
   if (test === null) return [];
   const gauge = gaugeOfFinish(plan);
-  const limit = gaugeShare(test, 2 / 3, plan.job.conditions.barometer);
+  const { values } = plan.job;
+  const share = valueIn(values, underTest.share);
+  const limit = gaugeShare(test, share, plan.job.conditions.barometer);
+  const temperature = celsiusToKelvin(valueIn(values, underTest.settled));
+  const at = formatTemperature(temperature);
   const shownLimit = showPressure(plan, limit, gauge);
-  const pressure = developedPressure(context, celsiusToKelvin(15));
+  const pressure = developedPressure(context, temperature);
   if (!pressure.ok) {
-    const text = words.pressureNotComputed('Settled pressure', '15 °C', pressure.reason.code);
+    const text = pressureWords.pressureNotComputed('Settled pressure', at, pressure.reason.code);
     return [finding(settledCard, { verdict: 'caution', place, words: text, figure: NOT_COMPUTED, limit: shownLimit })];
   }
   if (!exceeds(pressure.value, limit)) return [];
   const shown = showAgainst(plan, pressure.value, limit, gauge);
-  return [finding(settledCard, { verdict: 'caution', place, words: words.aboveTwoThirds(shown.figure, shown.limit), ...shown })];
+  return [finding(settledCard, { verdict: 'caution', place, words: words.aboveTwoThirds(shown.figure, shown.limit, at, share === underTest.share.value ? 'two thirds' : showShare(share)), ...shown })];
 }

@@ -3,13 +3,13 @@ import type { Words } from './words.ts';
 
 /** Sentences about the class of the finished gas, and of toxic gases. */
 
-/** What was done where a coefficient is missing, remembered or a tolerance not stated; empty when nothing. */
-export function assumptions(standIns: readonly string[], toleranceAssumed: boolean): string {
+/** What was done where a coefficient is missing, remembered or a tolerance not stated, with what is taken for it; empty when nothing. */
+export function assumptions(standIns: readonly string[], tolerance: string | null): string {
   const parts: string[] = [];
   if (standIns.length > 0) {
     parts.push(` Coefficient missing or from memory, replaced by a cautious one: ${standIns.join(', ')}.`);
   }
-  if (toleranceAssumed) parts.push(' Components without a stated tolerance are taken at ±10 %.');
+  if (tolerance !== null) parts.push(` Components without a stated tolerance are taken at ±${tolerance}.`);
   return parts.join('');
 }
 
@@ -49,15 +49,15 @@ export const classNotComputed = (what: string, code: string): Words => ({
   remedy: 'Treat the gas as belonging to the more hazardous class until someone with the data has judged it.',
 });
 
-export const oxidising = (nominal: string, worst: string, assumed: string): Words => ({
+export const oxidising = (nominal: string, worst: string, limit: string, assumed: string): Words => ({
   title: `Oxidising power of the finished gas ${nominal}`,
-  detail: `More oxidising than air from 23.5 % on; highest within the tolerance ${worst}.${assumed}`,
+  detail: `More oxidising than air from ${limit} on; highest within the tolerance ${worst}.${assumed}`,
   remedy: 'Label as oxidising gas; keep valve and fittings free of oil and grease.',
 });
 
-export const notOxidising = (nominal: string, worst: string, assumed: string): Words => ({
+export const notOxidising = (nominal: string, worst: string, limit: string, assumed: string): Words => ({
   title: `Oxidising power of the finished gas ${nominal}`,
-  detail: `Not above 23.5 %; highest within the tolerance ${worst}.${assumed}`,
+  detail: `Not above ${limit}; highest within the tolerance ${worst}.${assumed}`,
   remedy: '',
 });
 

@@ -2,12 +2,6 @@ import type { Words } from './words.ts';
 
 /** Sentences about contents, purity and the reach of the gas model. */
 
-export const contentsNotStated = (): Words => ({
-  title: 'What is in the cylinder before filling is not stated',
-  detail: 'The plan assumes a perfect vacuum. Left gas would change every stop, and may be flammable, oxidising or wet.',
-  remedy: 'Evacuate the cylinder and enter the vacuum, or measure pressure and temperature of what is in it and enter its composition.',
-});
-
 export const outsideRange = (where: string): Words => ({
   title: `Outside the range of the gas model ${where}`,
   detail: 'Temperature or pressure lies outside the range for which the authors of the equation state it; the stops are extrapolated.',
@@ -20,19 +14,19 @@ export const extendedRange = (where: string): Words => ({
   remedy: '',
 });
 
-export const estimatedPairs = (pairs: string, matters: boolean): Words => ({
+export const estimatedPairs = (pairs: string, matters: boolean, from: string): Words => ({
   title: `Gas model estimated for ${pairs}`,
   detail: matters
-    ? 'No measurements stand behind these pairs and both gases are above 1 %; the stops may be off by more than usual.'
-    : 'No measurements stand behind these pairs; one gas of each is below 1 %, so little depends on it.',
+    ? `No measurements stand behind these pairs and both gases are above ${from}; the stops may be off by more than usual.`
+    : `No measurements stand behind these pairs; one gas of each is below ${from}, so little depends on it.`,
   remedy: matters ? 'Weigh these additions if you can, and verify the finished gas by analysis.' : '',
 });
 
-export const cubicGas = (gases: string, matters: boolean): Words => ({
+export const cubicGas = (gases: string, matters: boolean, from: string): Words => ({
   title: `Cubic equation for ${gases}`,
   detail: matters
-    ? 'No reference equation of these gases is at hand, and one is above 1 %: the stops may be off by more than usual.'
-    : 'No reference equation of these gases is at hand; each is below 1 %, so little depends on it.',
+    ? `No reference equation of these gases is at hand, and one is above ${from}: the stops may be off by more than usual.`
+    : `No reference equation of these gases is at hand; each is below ${from}, so little depends on it.`,
   remedy: matters ? 'Weigh these additions if you can, and verify the finished gas by analysis.' : '',
 });
 

@@ -5,10 +5,10 @@ import type { Words } from './words.ts';
 const why =
   'Published limits hold at atmospheric pressure; under pressure the flammable range widens and less oxygen is enough, and no table covers a filled cylinder.';
 
-export const togetherHold = (where: string, fuel: string, oxygen: string, pressure: string, more: string): Words => ({
+export const togetherHold = (where: string, fuel: string, oxygen: string, pressure: string, more: string, share: string): Words => ({
   title: `Fuel and oxidiser together ${where}: fuel at ${fuel} of its lower flammable limit, oxygen ${oxygen}`,
   detail: `At ${pressure} this mixture may burn or explode in the cylinder. ${why}${more}`,
-  remedy: 'Dilute the fuel below 25 % of its limit before any oxidiser comes in, keep the oxygen low, or make the mixture by another method after a reviewed feasibility study.',
+  remedy: `Dilute the fuel below ${share} of its limit before any oxidiser comes in, keep the oxygen low, or make the mixture by another method after a reviewed feasibility study.`,
 });
 
 export const togetherLean = (where: string, fuel: string, oxygen: string, pressure: string, more: string): Words => ({
@@ -17,9 +17,9 @@ export const togetherLean = (where: string, fuel: string, oxygen: string, pressu
   remedy: 'Add slowly, keep the order of addition, and have the route reviewed by someone licensed to fill such mixtures.',
 });
 
-export const togetherTrace = (where: string, fuel: string, oxygen: string): Words => ({
+export const togetherTrace = (where: string, fuel: string, oxygen: string, share: string): Words => ({
   title: `Trace of fuel or oxidiser ${where}`,
-  detail: `Fuel at ${fuel} of its lower flammable limit, oxygen ${oxygen}; one of them is below 1 % of its limit.`,
+  detail: `Fuel at ${fuel} of its lower flammable limit, oxygen ${oxygen}; one of them is below ${share} of its limit.`,
   remedy: '',
 });
 
@@ -47,11 +47,11 @@ export const boundaryLean = (step: number, parent: string, oxidiserEnters: boole
   remedy: 'Add slowly, purge the line with inert gas between the two, and keep this order of addition.',
 });
 
-export const boundaryTrace = (step: number, parent: string, oxidiserEnters: boolean, before: string): Words => ({
+export const boundaryTrace = (step: number, parent: string, oxidiserEnters: boolean, before: string, most: string): Words => ({
   title: oxidiserEnters
     ? `Step ${step}: oxidiser (${parent}) meets a trace of fuel left at low pressure`
     : `Step ${step}: fuel (${parent}) meets a trace of oxidiser left at low pressure`,
-  detail: `There is enough for a flammable mixture of at most 50 mbar absolute in the whole cylinder (${before} in it before).`,
+  detail: `There is enough for a flammable mixture of at most ${most} in the whole cylinder (${before} in it before).`,
   remedy: '',
 });
 

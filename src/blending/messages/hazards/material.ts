@@ -16,9 +16,9 @@ export const hydrogenSulfideInSteel = (figure: string, stated: boolean): Words =
   remedy: 'Use dry gas and treated aluminium, or steel whose strength is limited for this service.',
 });
 
-export const hydrogenInSteel = (partial: string, stated: boolean): Words => ({
+export const hydrogenInSteel = (partial: string, from: string, stated: boolean): Words => ({
   title: `Hydrogen in steel, partial pressure ${partial}`,
-  detail: `Above about 50 bar of hydrogen, quenched and tempered steel must be limited in strength (about 950 MPa); such cylinders carry the mark H.${unknown(stated)}`,
+  detail: `Above a partial pressure of about ${from}, quenched and tempered steel must be limited in strength (about 950 MPa); such cylinders carry the mark H.${unknown(stated)}`,
   remedy: 'Check the mark on the shoulder, or take aluminium.',
 });
 

@@ -47,9 +47,9 @@ export const compressionHeat = (name: string, ratio: string, temperature: string
   remedy: 'Open the parent valve slowly onto a closed filling valve, equalise, then throttle. No plastic or dirty parts at dead ends.',
 });
 
-export const compressionHeatLow = (name: string, ratio: string, temperature: string, from: string): Words => ({
+export const compressionHeatLow = (name: string, ratio: string, temperature: string, from: string, slow: string): Words => ({
   title: `Opening ${name} quickly could heat the line to ${temperature}`,
-  detail: `Adiabatic compression of ideal oxygen by a ratio of ${ratio} from ${from} and atmospheric pressure; its supply pressure is not above 125 psi gauge, from where slow-opening valves are asked for.`,
+  detail: `Adiabatic compression of ideal oxygen by a ratio of ${ratio} from ${from} and atmospheric pressure; its supply pressure is not above ${slow}, from where slow-opening valves are asked for.`,
   remedy: '',
 });
 

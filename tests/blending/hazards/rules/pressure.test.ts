@@ -140,7 +140,7 @@ describe('developed-pressures', () => {
   });
 
   it('speaks in the unit of the gauge', () => {
-    const psi = { key: 'p', name: 'P', unit: 'psi', reference: 'gauge', fullScale: bar(400), span: 4e7, accuracy: 1e5, resolution: 1e5 } as const;
+    const psi = { key: 'p', name: 'P', unit: 'psi', reference: 'gauge', fullScale: bar(400), span: 4e7, accuracy: 1e5, accuracyOfReading: 0, resolution: 1e5 } as const;
     expect(findingsOf('working-pressure', nitrogen(150, {}, { gauges: [psi] }))[0]?.figure).toMatch(/^\d{4} psi gauge$/u);
   });
 });

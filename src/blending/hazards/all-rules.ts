@@ -1,0 +1,81 @@
+import type { HazardRule } from './rule.ts';
+import { acetylenePressure } from './rules/acetylene-pressure.ts';
+import { balanceTooCoarse } from './rules/balance.ts';
+import { carbonMonoxidePressure } from './rules/carbon-monoxide-pressure.ts';
+import { condensationAtStep } from './rules/condensation-step.ts';
+import { condensationInStorage } from './rules/condensation-storage.ts';
+import { contentsNotStated } from './rules/contents.ts';
+import { cylinderMaterial } from './rules/cylinder-material.ts';
+import { fillingDensity, fillingRatio } from './rules/filling.ts';
+import { flammableGas } from './rules/flammable-gas.ts';
+import { fuelMeetsOxidiser } from './rules/fuel-meets-oxidiser.ts';
+import { fuelWithOxidiser } from './rules/fuel-with-oxidiser.ts';
+import { cubicGas, estimatedPairs, modelRange, nitrogenDioxidePairs } from './rules/gas-model.ts';
+import { gaugeOverRange, gaugeTooCoarse } from './rules/gauge.ts';
+import { hazardZone } from './rules/hazard-zone.ts';
+import { incompatiblePair } from './rules/incompatible-pair.ts';
+import { laboratoryValues } from './rules/laboratory-values.ts';
+import { material, valveAndFittings } from './rules/metal.ts';
+import { nitricOxidePressure } from './rules/nitric-oxide-pressure.ts';
+import { orderNotSearched } from './rules/order-not-searched.ts';
+import { overfillNotAllowed } from './rules/overfill.ts';
+import { oxidisingGas } from './rules/oxidising-gas.ts';
+import { oxygenCompressionHeat } from './rules/oxygen-compression.ts';
+import { oxygenEnriched } from './rules/oxygen-enriched.ts';
+import { oxygenLine } from './rules/oxygen-line.ts';
+import { developedPressures, pressureAt55 } from './rules/pressure-when-hot.ts';
+import { purityNotStated, unorderedGas } from './rules/purity.ts';
+import { roomToxic } from './rules/room-toxic.ts';
+import { roomFlammableRule, roomOxygenRule } from './rules/room.ts';
+import { stopAboveWorkingPressure } from './rules/stop-pressure.ts';
+import { supplyPressure } from './rules/supply.ts';
+import { testPressure, twoThirdsOfTestPressure } from './rules/test-pressure.ts';
+import { toxicGas } from './rules/toxic-gas.ts';
+import { workingPressure } from './rules/working-pressure.ts';
+
+/** Every rule, the gravest subjects first; findings of equal weight keep this order. */
+export const hazardRules: readonly HazardRule[] = [
+  fuelWithOxidiser,
+  fuelMeetsOxidiser,
+  incompatiblePair,
+  acetylenePressure,
+  workingPressure,
+  testPressure,
+  stopAboveWorkingPressure,
+  twoThirdsOfTestPressure,
+  pressureAt55,
+  fillingDensity,
+  fillingRatio,
+  carbonMonoxidePressure,
+  nitricOxidePressure,
+  overfillNotAllowed,
+  contentsNotStated,
+  oxygenEnriched,
+  oxygenLine,
+  oxygenCompressionHeat,
+  toxicGas,
+  hazardZone,
+  flammableGas,
+  oxidisingGas,
+  condensationInStorage,
+  condensationAtStep,
+  roomOxygenRule,
+  roomFlammableRule,
+  roomToxic,
+  cylinderMaterial,
+  material,
+  valveAndFittings,
+  orderNotSearched,
+  supplyPressure,
+  gaugeOverRange,
+  gaugeTooCoarse,
+  balanceTooCoarse,
+  unorderedGas,
+  purityNotStated,
+  modelRange,
+  estimatedPairs,
+  cubicGas,
+  nitrogenDioxidePairs,
+  developedPressures,
+  laboratoryValues,
+];
