@@ -30,6 +30,8 @@ export const keptApart: readonly { readonly from: RegExp; readonly to: RegExp }[
 
 /** Where each package may be imported from. A package that is not listed may be imported from nowhere. */
 export const packageHomes: Readonly<Record<string, RegExp>> = {
+  yalps: /^src\/blending\/stock\//,
+  papaparse: /^src\/blending\/stock\//,
   mathjs: /^src\/units\//,
   valibot: /^src\/(blending|state|headless)\//,
   '@noble/hashes': /^src\/(blending|state)\//,
