@@ -4,11 +4,15 @@ import { defineConfig } from 'vitest/config';
 import { programVersion } from './.ci/lib/project.mjs';
 import { offline } from './.ci/vite/offline.ts';
 import { contentPolicy, policyHeaders } from './.ci/vite/policy.ts';
+import { reachedAtOnce } from './.ci/vite/reached.ts';
+
+/** What the page's entry reaches without waiting. */
+const page = reachedAtOnce(/\/src\/main\.tsx$/);
 
 export default defineConfig({
   // Relative addresses, so that the built folder works under any path of a server.
   base: './',
-  plugins: [react(), contentPolicy(), offline()],
+  plugins: [react(), contentPolicy(), offline(), page.plugin],
   define: { __PROGRAM_VERSION__: JSON.stringify(programVersion()) },
   resolve: {
     // The barrel of mathjs loads the whole library, 0.8 s in every test file and command; only its unit class is used.
@@ -23,7 +27,10 @@ export default defineConfig({
       output: {
         // One chunk for what the first plan computes with: a lazily loaded view that shares a part of it would otherwise
         // cut it into pieces that compress worse. What comes later keeps its own chunks.
-        codeSplitting: { groups: [{ name: 'react', test: /node_modules\/(react|react-dom|scheduler)\// }, { name: 'core', test: /src\/(units|thermo|blending)\/(?!.*(beyond-gerg|helmholtz|peng-robinson|data\/pairs|working\/explain|proof|uncertainty))/ }] },
+        codeSplitting: { groups: [
+          { name: 'react', test: /node_modules\/(react|react-dom|scheduler)\// },
+          { name: 'core', test: (id: string) => /src\/(units|thermo|blending)\//.test(id) && page.isReached(id) },
+        ] },
       },
     },
     // The size check follows the imports it lists.

@@ -1,9 +1,9 @@
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
-import { demoRecipes, loadAllGases, planRecipe } from './blending/index.ts';
-import type { ProofRunner } from './blending/index.ts';
-import { createWorkspace, localRecipeStorage } from './state/index.ts';
-import { App, printedNow, WorkspaceProvider } from './ui/index.ts';
+import { demoRecipes, loadRest, loadStockTools, planRecipe } from './blending/index.ts';
+import type { Arrangement, Calculator, ProofRunner, Recipe } from './blending/index.ts';
+import { createWorkspace, loadStockroom, localRecipeStorage } from './state/index.ts';
+import { App, CalculatorProvider, printedNow, StockroomProvider, WorkspaceProvider } from './ui/index.ts';
 
 /* Composition root: the only file that knows every layer. */
 
@@ -19,21 +19,29 @@ function openStorage(): Storage | null {
   }
 }
 
+const storage = localRecipeStorage(openStorage, window);
+const clock = () => Date.now();
+
+function schedule(delay: number, run: () => void): () => void {
+  const timer = window.setTimeout(run, delay);
+  return () => { window.clearTimeout(timer); };
+}
+
+/** Orders of addition that the worker found, by the very recipe they are of. */
+const bestOrders = new WeakMap<Recipe, Arrangement>();
+
 const workspace = createWorkspace({
-  planner: (recipe) => planRecipe(recipe),
-  storage: localRecipeStorage(openStorage, window),
-  clock: () => Date.now(),
+  planner: (recipe) => planRecipe(recipe, { arrangement: bestOrders.get(recipe) }),
+  storage,
+  clock,
   newId: () => Array.from(crypto.getRandomValues(new Uint8Array(8)), (byte) => byte.toString(16).padStart(2, '0')).join(''),
-  schedule: (delay, run) => {
-    const timer = window.setTimeout(run, delay);
-    return () => { window.clearTimeout(timer); };
-  },
+  schedule,
   program,
   starters: demoRecipes,
 });
 
-/* The equations outside GERG-2008 come after the page; until then a recipe that needs one says so. */
-void loadAllGases().then(() => { workspace.actions.replan(); });
+/* What the first plan can do without comes after the page; until then a plan says what it was made without. */
+void loadRest().then(() => { workspace.actions.replan(); });
 
 window.addEventListener('pagehide', () => { workspace.actions.flush(); });
 window.addEventListener('afterprint', () => { if (printedNow() === 'sheet') workspace.actions.markIssued(); });
@@ -51,12 +59,55 @@ const prover: ProofRunner = {
   },
 };
 
+let asker: Promise<Calculator> | undefined;
+
+/** The thread for longer calculations, fetched with the first of them. */
+const calculator: Calculator = {
+  ask: (name, input, report) => {
+    let forget = () => { forgotten = true; };
+    let forgotten = false;
+    asker ??= import('./worker/index.ts').then((worker) => worker.calculator());
+    asker.then(
+      (worker) => { if (!forgotten) forget = worker.ask(name, input, report); },
+      (error: unknown) => { report({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }); },
+    );
+    return () => { forget(); };
+  },
+};
+
+let searched: Recipe | undefined;
+
+/* A recipe with too many parents to search while one types: its best order comes from the worker. */
+workspace.store.subscribe(({ recipe, answer }) => {
+  if (!answer.ok || answer.value.sequence !== 'not searched yet' || bestOrders.has(recipe) || searched === recipe) return;
+  searched = recipe;
+  calculator.ask('study', recipe, (result) => {
+    if (result.kind !== 'answer' || !result.answer.ok) return;
+    bestOrders.set(recipe, result.answer.value.study.chosen.arrangement);
+    if (workspace.store.getState().recipe === recipe) workspace.actions.replan();
+  });
+});
+
+/** The stock, opened when somebody first looks at it. */
+async function makeStock() {
+  const [commands, tools] = await Promise.all([loadStockroom(), loadStockTools()]);
+  const room = await commands.openStockroom({ storage, clock, schedule, program, starter: tools.demoStock });
+  window.addEventListener('pagehide', () => { room.actions.flush(); });
+  return { room, commands, tools };
+}
+let stock: ReturnType<typeof makeStock> | undefined;
+const openStock = () => (stock ??= makeStock());
+
 const root = document.getElementById('root');
 if (root === null) throw new Error('index.html has no element with the id "root".');
 createRoot(root).render(
   <StrictMode>
     <WorkspaceProvider workspace={workspace}>
-      <App program={program} prover={prover} />
+      <CalculatorProvider calculator={calculator}>
+        <StockroomProvider open={openStock}>
+          <App program={program} prover={prover} />
+        </StockroomProvider>
+      </CalculatorProvider>
     </WorkspaceProvider>
   </StrictMode>,
 );

@@ -20,6 +20,9 @@ import { useUndoKeys } from './undo-keys.ts';
 const FinishedView = lazy(async () => ({ default: (await import('./tasks/finished/FinishedView.tsx')).FinishedView }));
 const MixingView = lazy(async () => ({ default: (await import('./tasks/mixing/MixingView.tsx')).MixingView }));
 const RecipesView = lazy(async () => ({ default: (await import('./tasks/recipes/RecipesView.tsx')).RecipesView }));
+const RouteView = lazy(() => import('./tasks/route/RouteView.tsx'));
+const StockView = lazy(() => import('./tasks/stock/StockView.tsx'));
+const ValuesView = lazy(() => import('./tasks/values/ValuesView.tsx'));
 const GasesView = lazy(() => import('./tasks/gases/GasesView.tsx'));
 const ProofView = lazy(() => import('./tasks/proof/ProofView.tsx'));
 // The sheet is fetched right after the first plan, long before anybody can print it.
@@ -32,6 +35,8 @@ export function App({ program, prover }: { readonly program: string; readonly pr
   const answer = useWorkspaceState((state) => state.answer);
   const openId = useWorkspaceState((state) => state.openId);
   const proof = useProofRun(prover);
+  // Their tables need the room of the checks, which are of the plan.
+  const isWide = view === 'stock' || view === 'values';
   useUndoKeys();
   return (
     <ProblemsProvider answer={answer}>
@@ -39,7 +44,7 @@ export function App({ program, prover }: { readonly program: string; readonly pr
         <Header view={view} onView={setView} />
         <OfflineNotice />
         <NoticeBar />
-        <div className="workspace">
+        <div className={isWide ? 'workspace wide' : 'workspace'}>
           <div className="slip" key={openId}>
             <OrderSection plan={answer.ok ? answer.value : null} />
             <FillSection />
@@ -50,14 +55,17 @@ export function App({ program, prover }: { readonly program: string; readonly pr
           <main className="middle" id="main">
             {view === 'plan' && <PlanView answer={answer} />}
             <Suspense fallback={null}>
+              {view === 'route' && <RouteView answer={answer} />}
               {view === 'finished' && <FinishedView answer={answer} />}
               {view === 'mixing' && <MixingView answer={answer} />}
               {view === 'recipes' && <RecipesView onOpened={() => { setView('plan'); }} />}
+              {view === 'stock' && <StockView onTaken={() => { setView('plan'); }} />}
               {view === 'gases' && <GasesView />}
+              {view === 'values' && <ValuesView />}
               {view === 'proof' && <ProofView proof={proof} />}
             </Suspense>
           </main>
-          <aside className="checks" aria-label="Checks"><ChecksPanel answer={answer} /></aside>
+          {!isWide && <aside className="checks" aria-label="Checks"><ChecksPanel answer={answer} /></aside>}
         </div>
       </div>
       <Suspense fallback={null}><FillSheet program={program} /></Suspense>

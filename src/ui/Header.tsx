@@ -3,14 +3,17 @@ import { useActions, useWorkspaceState } from './bindings/workspace.tsx';
 import { printPage } from './parts/printing.ts';
 import { openHolds } from './tasks/checks/override.ts';
 
-export type View = 'plan' | 'finished' | 'mixing' | 'recipes' | 'gases' | 'proof';
+export type View = 'plan' | 'route' | 'finished' | 'mixing' | 'stock' | 'recipes' | 'gases' | 'values' | 'proof';
 
 const VIEWS: readonly (readonly [View, string])[] = [
   ['plan', 'Plan'],
+  ['route', 'Route'],
   ['finished', 'Finished gas'],
   ['mixing', 'Mixing'],
+  ['stock', 'Stock'],
   ['recipes', 'Recipes'],
   ['gases', 'Gases'],
+  ['values', 'Limits'],
   ['proof', 'Proof'],
 ];
 
@@ -23,13 +26,13 @@ export function Header({ view, onView }: { readonly view: View; readonly onView:
       <h1 className="brand">Fillwright</h1>
       <input className="input recipe-name" type="text" aria-label="Name of the recipe" value={recipe.name} spellCheck={false} onChange={(event) => { actions.run(renameRecipe(event.currentTarget.value)); }} />
       <input className="input recipe-note" type="text" aria-label="Note" placeholder="note" value={recipe.note} spellCheck={false} onChange={(event) => { actions.run(editNote(event.currentTarget.value)); }} />
+      <SaveAndUndo />
+      <PrintButton />
       <nav aria-label="Views">
         {VIEWS.map(([id, name]) => (
           <button key={id} type="button" className="tab" aria-current={view === id ? 'page' : undefined} onClick={() => { onView(id); }}>{name}</button>
         ))}
       </nav>
-      <SaveAndUndo />
-      <PrintButton />
     </header>
   );
 }

@@ -1,14 +1,7 @@
 import type { ProofRunner, ProofUpdate } from '../blending/index.ts';
 import { inlineRunner } from './inline.ts';
-import type { WorkerAnswer, WorkerRequest } from './protocol.ts';
-
-/** The little of a worker that is used here. */
-export interface WorkerLike {
-  postMessage(request: WorkerRequest): void;
-  terminate(): void;
-  onmessage: ((event: { readonly data: WorkerAnswer }) => void) | null;
-  onerror: ((event: { readonly message?: string; preventDefault?(): void }) => void) | null;
-}
+import { makeWorker } from './make-worker.ts';
+import type { WorkerLike } from './make-worker.ts';
 
 /**
  * Runs the proof in a worker. A browser that grants none, or one that cannot load it,
@@ -28,6 +21,7 @@ export function proofRunner(make: () => WorkerLike | null = makeWorker, fallback
       };
       worker.onmessage = ({ data }) => {
         begun = true;
+        if (data.kind === 'calculated') return;
         if (data.kind === 'finished' || data.kind === 'failed') end(data);
         else report(data);
       };
@@ -44,15 +38,4 @@ export function proofRunner(make: () => WorkerLike | null = makeWorker, fallback
       return () => { stop(); };
     },
   };
-}
-
-/** null where the browser has no workers or refuses this one. */
-function makeWorker(): WorkerLike | null {
-  if (typeof Worker === 'undefined') return null;
-  try {
-    return new Worker(new URL('./entry.ts', import.meta.url), { type: 'module', name: 'proof' }) as WorkerLike;
-  } catch (error) {
-    if (error instanceof DOMException) return null;
-    throw error;
-  }
 }

@@ -1,3 +1,4 @@
+import { loadCalculations } from '../blending/index.ts';
 import { driveProof } from './drive.ts';
 import type { WorkerAnswer, WorkerRequest } from './protocol.ts';
 
@@ -17,8 +18,11 @@ const thread = {
   stopped: () => false,
 };
 
-scope.onmessage = () => {
-  driveProof((update) => { scope.postMessage(update); }, thread).catch((error: unknown) => {
+scope.onmessage = ({ data }) => {
+  const done = data.kind === 'prove'
+    ? driveProof((update) => { scope.postMessage(update); }, thread)
+    : loadCalculations({ ownThread: true }).then(({ calculate }) => { scope.postMessage({ kind: 'calculated', answer: calculate(data.name, data.input) }); });
+  done.catch((error: unknown) => {
     scope.postMessage({ kind: 'failed', message: error instanceof Error ? error.message : 'unknown error' });
   });
 };

@@ -1,9 +1,11 @@
-import type { ProofUpdate } from '../blending/index.ts';
+import type { CalculationName, Calculations, ProofUpdate } from '../blending/index.ts';
 
-/** What the page asks of the worker. Stopping needs no message: the page ends the worker. */
-export interface WorkerRequest {
-  readonly kind: 'prove';
-}
+/** What the page asks of a worker. Stopping a proof needs no message: the page ends the worker. */
+export type WorkerRequest =
+  | { readonly kind: 'prove' }
+  | { readonly [Name in CalculationName]: { readonly kind: 'calculate'; readonly name: Name; readonly input: Calculations[Name]['input'] } }[CalculationName];
 
 /** What the worker tells the page: plain data, copied from thread to thread. */
-export type WorkerAnswer = ProofUpdate;
+export type WorkerAnswer =
+  | ProofUpdate
+  | { readonly kind: 'calculated'; readonly answer: Calculations[CalculationName]['answer'] };

@@ -1,7 +1,6 @@
-import {
-  checksum, parseJson, readRecipeDocument, recipeDocument, type FileProblem, type Recipe,
-} from '../../blending/index.ts';
+import { parseJson, readRecipeDocument, recipeDocument, type FileProblem, type Recipe } from '../../blending/index.ts';
 import { fail, ok, type Outcome } from '../../units/index.ts';
+import { recordOf, seal, unseal, type SealProblem } from './seal.ts';
 
 /** The last sheet that went out: its revision and the content id printed on it. */
 export interface Issued {
@@ -20,13 +19,7 @@ export interface Entry {
 
 /** Why a stored entry is not trusted. It is left as it is. */
 export type EntryProblem =
-  | { readonly code: 'entry-empty' }
-  /** No readable first line. */
-  | { readonly code: 'entry-not-json' }
-  | { readonly code: 'entry-other-format' }
-  | { readonly code: 'entry-newer-version'; readonly version: number; readonly newest: number }
-  /** Cut off or changed since it was written. */
-  | { readonly code: 'entry-checksum' }
+  | SealProblem
   /** The checksum holds, yet a field of the envelope is not what it should be. */
   | { readonly code: 'entry-invalid'; readonly field: 'body' | 'savedAt' | 'issued' }
   | FileProblem;
@@ -34,32 +27,19 @@ export type EntryProblem =
 const format = 'fillwright-saved-recipe';
 const newest = 1;
 
-/**
- * Writes an entry: a first line with format, version and the SHA-256 of the
- * rest, then the rest as one line of JSON. The checksum is over the text as
- * stored, so it can be verified before anything in it is interpreted.
- */
+/** Writes an entry under a seal, see `seal.ts`. */
 export function encodeEntry(entry: Entry, program: string): string {
-  const body = JSON.stringify({
+  return seal(format, newest, JSON.stringify({
     savedAt: entry.savedAt,
     issued: entry.issued,
     file: recipeDocument(entry.recipe, program),
-  });
-  return `${JSON.stringify({ format, version: newest, checksum: checksum(body) })}\n${body}`;
+  }));
 }
 
-/** Reads an entry: header, version, checksum, then the content. Fails with the first problem. */
+/** Reads an entry: the seal, then the content. Fails with the first problem. */
 export function decodeEntry(text: string): Outcome<Entry, EntryProblem> {
-  if (text.trim() === '') return fail({ code: 'entry-empty' });
-  const split = text.indexOf('\n');
-  const header = parseJson(split < 0 ? text : text.slice(0, split));
-  if (!header.ok) return fail({ code: 'entry-not-json' });
-  const fields = recordOf(header.value);
-  if (fields?.format !== format || !isVersion(fields.version)) return fail({ code: 'entry-other-format' });
-  if (fields.version > newest) return fail({ code: 'entry-newer-version', version: fields.version, newest });
-  const body = split < 0 ? '' : text.slice(split + 1);
-  if (fields.checksum !== checksum(body)) return fail({ code: 'entry-checksum' });
-  return decodeBody(body);
+  const body = unseal(text, format, newest);
+  return body.ok ? decodeBody(body.value) : body;
 }
 
 function decodeBody(body: string): Outcome<Entry, EntryProblem> {
@@ -74,10 +54,6 @@ function decodeBody(body: string): Outcome<Entry, EntryProblem> {
   return file.ok ? ok({ recipe: file.value.recipe, savedAt, issued }) : file;
 }
 
-function isVersion(version: unknown): version is number {
-  return typeof version === 'number' && Number.isSafeInteger(version) && version >= 1;
-}
-
 /** The noted sheet; undefined: not one. */
 function issuedOf(value: unknown): Issued | undefined {
   const fields = recordOf(value);
@@ -85,10 +61,4 @@ function issuedOf(value: unknown): Issued | undefined {
   const { revision, contentId } = fields;
   if (typeof revision !== 'number' || !Number.isSafeInteger(revision) || revision < 1) return undefined;
   return typeof contentId === 'string' ? { revision, contentId } : undefined;
-}
-
-function recordOf(value: unknown): Readonly<Record<string, unknown>> | null {
-  return typeof value === 'object' && value !== null && !Array.isArray(value)
-    ? (value as Readonly<Record<string, unknown>>)
-    : null;
 }

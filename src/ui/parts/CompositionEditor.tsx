@@ -3,16 +3,18 @@ import { TextField } from './Field.tsx';
 import { GasField } from './GasField.tsx';
 import { SectionProblem } from './SectionProblem.tsx';
 
-interface CompositionEditorProps {
+interface CompositionEditorProps<Line extends CompositionLine> {
   /** Path of the list in the recipe. */
   readonly path: string;
   readonly legend: string;
-  readonly lines: readonly CompositionLine[];
-  readonly onChange: (lines: readonly CompositionLine[]) => void;
+  readonly lines: readonly Line[];
+  /** A line of nothing, to add. */
+  readonly blank: Line;
+  readonly onChange: (lines: readonly Line[]) => void;
 }
 
 /** A short table of gas and amount, for residuals and purity tables. */
-export function CompositionEditor({ path, legend, lines, onChange }: CompositionEditorProps) {
+export function CompositionEditor<Line extends CompositionLine>({ path, legend, lines, blank, onChange }: CompositionEditorProps<Line>) {
   const edit = (index: number, patch: Partial<CompositionLine>) => {
     onChange(lines.map((line, place) => (place === index ? { ...line, ...patch } : line)));
   };
@@ -33,7 +35,7 @@ export function CompositionEditor({ path, legend, lines, onChange }: Composition
       <SectionProblem field={path} />
       <button
         type="button" className="plain"
-        onClick={() => { onChange([...lines, { gas: '', amount: lines.length === 0 ? 'balance' : '' }]); }}
+        onClick={() => { onChange([...lines, { ...blank, amount: lines.length === 0 ? 'balance' : '' }]); }}
       >
         Add a line
       </button>

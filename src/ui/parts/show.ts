@@ -51,7 +51,8 @@ export function relativePercent(value: number, reference: number): string {
   return `${percent < 0 ? '−' : '+'}${size} %`;
 }
 
-/** Name of the parent of a step as the technician wrote it. */
+/** Name of the parent of a step as the technician wrote it; of a split one, how much of it this is. */
 export function parentName(job: Job, step: PlanStep): string {
-  return job.parents.find((parent) => parent.key === step.parent)?.name ?? step.parent;
+  const name = job.parents.find((parent) => parent.key === step.parent)?.name ?? step.parent;
+  return step.share < 1 ? `${name}, ${formatSignificant(100 * step.share, 3)} % of it` : name;
 }

@@ -72,6 +72,7 @@ function FindingBody({ finding }: { readonly finding: Finding }) {
       <p>{finding.detail}</p>
       {finding.remedy !== '' && <p className="remedy">{finding.remedy}</p>}
       {finding.limit !== '' && <p className="limits">Figure: {finding.figure}. Limit: {finding.limit}.</p>}
+      {finding.replaced.length > 0 && <p className="limits"><strong>own value</strong> Judged with the laboratory’s own value in place of a published one.</p>}
       <p className="source">{finding.source}{finding.trust === 'seen' ? '' : ` · ${finding.trust}`}</p>
     </>
   );

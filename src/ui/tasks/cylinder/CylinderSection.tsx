@@ -25,6 +25,13 @@ export function CylinderSection() {
       <TextField field="conditions.coldestStorage" label="coldest storage" value={coldest} placeholder="not stated" onChange={(coldestStorage) => { actions.run(editConditions({ coldestStorage })); }} />
       <ContentsFields />
       <details>
+        <summary>Test date, valve and history</summary>
+        <TextField field="cylinder.testDue" label="next test" value={cylinder.testDue} placeholder="2027-03-31" onChange={(testDue) => { edit({ testDue }); }} />
+        <TextField field="cylinder.valveOutlet" label="valve outlet" value={cylinder.valveOutlet} onChange={(valveOutlet) => { edit({ valveOutlet }); }} />
+        <TextField field="cylinder.held" label="has held" value={cylinder.held} placeholder="CO, CO₂, N₂" onChange={(held) => { edit({ held }); }} />
+        <TextField field="cylinder.conditionedFor" label="conditioned for" value={cylinder.conditionedFor} onChange={(conditionedFor) => { edit({ conditionedFor }); }} />
+      </details>
+      <details>
         <summary>Growth and start reading</summary>
         <TextField field="cylinder.pressureExpansion" label="growth by pressure" value={cylinder.pressureExpansion} placeholder="by material" onChange={(pressureExpansion) => { edit({ pressureExpansion }); }} />
         <TextField field="cylinder.thermalExpansion" label="growth by temperature" value={cylinder.thermalExpansion} placeholder="by material" onChange={(thermalExpansion) => { edit({ thermalExpansion }); }} />
@@ -55,7 +62,7 @@ function ContentsFields() {
         <>
           <TextField field="cylinder.contents.temperature" label="its temperature" value={contents.temperature} onChange={(temperature) => { actions.run(editContents({ temperature })); }} />
           <CompositionEditor
-            path="cylinder.contents.composition" legend="composition of the residual" lines={contents.composition}
+            path="cylinder.contents.composition" legend="composition of the residual" lines={contents.composition} blank={{ gas: '', amount: '' }}
             onChange={(composition) => { actions.run(editContents({ composition })); }}
           />
         </>

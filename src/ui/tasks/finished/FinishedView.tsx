@@ -7,6 +7,7 @@ import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
 import { amountText, percentNumber, pressureNumber, relativePercent, scaleLabel, scaleOf } from '../../parts/show.ts';
 import type { Scale } from '../../parts/show.ts';
 import { Condensation } from './Condensation.tsx';
+import { SuggestedClassSection } from './SuggestedClass.tsx';
 import { NotPlanned } from '../plan/NotPlanned.tsx';
 
 const PressureTemperatureChart = lazy(() => import('../../charts/PressureTemperatureChart.tsx'));
@@ -23,6 +24,7 @@ export function FinishedView({ answer }: { readonly answer: PlanAnswer }) {
       <Totals plan={plan} />
       <Developed plan={plan} scale={scale} />
       <Condensation plan={plan} scale={scale} />
+      <SuggestedClassSection plan={plan} />
     </>
   );
 }

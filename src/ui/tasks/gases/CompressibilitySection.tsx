@@ -1,15 +1,17 @@
 import { lazy, Suspense, useId, useMemo, useState } from 'react';
-import { compressibilityCurve, entrySentence } from '../../../blending/index.ts';
-import type { CompressibilityCurve, GasLabel } from '../../../blending/index.ts';
+import { entrySentence } from '../../../blending/index.ts';
+import type { CompressibilityCurve, GasLabel, GasTools } from '../../../blending/index.ts';
 import { formatNumber, formatSignificant, formatTemperature, fromPascal, parseTemperature, pascal } from '../../../units/index.ts';
+import { useGasTools } from './tools.ts';
 import type { Kelvin } from '../../../units/index.ts';
 
 const GasCurveChart = lazy(() => import('../../charts/GasCurveChart.tsx'));
 
 const HIGHEST = pascal(300e5);
 
-function useCurve(gas: GasLabel['id'], temperature: Kelvin | null): ReturnType<typeof compressibilityCurve> | null {
-  return useMemo(() => (temperature === null ? null : compressibilityCurve(gas, temperature, HIGHEST)), [gas, temperature]);
+function useCurve(gas: GasLabel['id'], temperature: Kelvin | null): ReturnType<GasTools['compressibilityCurve']> | null {
+  const { compressibilityCurve } = useGasTools();
+  return useMemo(() => (temperature === null ? null : compressibilityCurve(gas, temperature, HIGHEST)), [compressibilityCurve, gas, temperature]);
 }
 
 /** Z against pressure at a temperature that can be chosen. */

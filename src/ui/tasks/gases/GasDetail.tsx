@@ -1,7 +1,7 @@
-import { gasCard } from '../../../blending/index.ts';
 import type { GasCard, GasFigure, GasLabel } from '../../../blending/index.ts';
 import { celsius, formatNumber, formatSignificant, fromPascal, type Kelvin } from '../../../units/index.ts';
 import { CompressibilitySection } from './CompressibilitySection.tsx';
+import { useGasTools } from './tools.ts';
 import { VapourPressureSection } from './VapourPressureSection.tsx';
 
 const EQUATIONS: Readonly<Record<GasCard['equation']['kind'], string>> = {
@@ -12,7 +12,7 @@ const EQUATIONS: Readonly<Record<GasCard['equation']['kind'], string>> = {
 
 /** What is known of one gas, and what its equation says. */
 export function GasDetail({ gas }: { readonly gas: GasLabel }) {
-  const card = gasCard(gas.id);
+  const card = useGasTools().gasCard(gas.id);
   return (
     <article className="gas-detail" aria-label={gas.name}>
       <h3>{gas.formula} <small>{gas.name}</small></h3>

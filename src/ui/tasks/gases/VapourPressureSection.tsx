@@ -1,7 +1,7 @@
 import { lazy, Suspense, useMemo } from 'react';
-import { correlatedVapourPressure, vapourPressureAt, vapourPressureCurve } from '../../../blending/index.ts';
 import type { GasLabel } from '../../../blending/index.ts';
 import { celsius, formatSignificant, formatTemperature, fromCelsius, fromPascal, NO_NUMBER } from '../../../units/index.ts';
+import { useGasTools } from './tools.ts';
 import type { Pascal } from '../../../units/index.ts';
 
 const GasCurveChart = lazy(() => import('../../charts/GasCurveChart.tsx'));
@@ -11,7 +11,8 @@ const TABLE = [-20, -10, 0, 10, 15, 20, 30, 40, 50];
 
 /** Where the pure gas condenses, over its whole range and at the temperatures of a bench. */
 export function VapourPressureSection({ gas }: { readonly gas: GasLabel }) {
-  const curve = useMemo(() => vapourPressureCurve(gas.id), [gas.id]);
+  const { correlatedVapourPressure, vapourPressureAt, vapourPressureCurve } = useGasTools();
+  const curve = useMemo(() => vapourPressureCurve(gas.id), [vapourPressureCurve, gas.id]);
   const rows = TABLE.map((degrees) => {
     const temperature = fromCelsius(degrees);
     return { temperature, byEquation: vapourPressureAt(gas.id, temperature)?.pressure ?? null, correlated: correlatedVapourPressure(gas.id, temperature) };

@@ -13,13 +13,15 @@ export function InstrumentsSection() {
       <h2 id="instruments-title">Instruments and room</h2>
       {gauges.map((gauge) => (
         <details key={gauge.key}>
-          <summary>{gauge.name === '' ? 'Gauge' : `Gauge ${gauge.name}`}: to {gauge.fullScale} {gauge.reference}, {gauge.accuracy} of span</summary>
+          <summary>{gauge.name === '' ? 'Gauge' : `Gauge ${gauge.name}`}: to {gauge.fullScale} {gauge.reference}, {gauge.accuracy} of {gauge.accuracyOf}</summary>
           <TextField field={`gauges.${gauge.key}.name`} label="name" value={gauge.name} onChange={(name) => { actions.run(editGauge(gauge.key, { name })); }} />
           <TextField field={`gauges.${gauge.key}.unit`} label="unit on its face" value={gauge.unit} onChange={(unit) => { actions.run(editGauge(gauge.key, { unit })); }} />
           <ChoiceField field={`gauges.${gauge.key}.reference`} label="reads" value={gauge.reference} choices={['gauge', 'absolute']} onChange={(reference) => { actions.run(editGauge(gauge.key, { reference })); }} />
           <TextField field={`gauges.${gauge.key}.fullScale`} label="full scale" value={gauge.fullScale} onChange={(fullScale) => { actions.run(editGauge(gauge.key, { fullScale })); }} />
-          <TextField field={`gauges.${gauge.key}.accuracy`} label="accuracy, of span" value={gauge.accuracy} onChange={(accuracy) => { actions.run(editGauge(gauge.key, { accuracy })); }} />
+          <TextField field={`gauges.${gauge.key}.accuracy`} label="accuracy" value={gauge.accuracy} onChange={(accuracy) => { actions.run(editGauge(gauge.key, { accuracy })); }} />
+          <ChoiceField field={`gauges.${gauge.key}.accuracyOf`} label="of" value={gauge.accuracyOf} choices={['span', 'reading']} onChange={(accuracyOf) => { actions.run(editGauge(gauge.key, { accuracyOf })); }} />
           <TextField field={`gauges.${gauge.key}.resolution`} label="smallest step" value={gauge.resolution} onChange={(resolution) => { actions.run(editGauge(gauge.key, { resolution })); }} />
+          <TextField field={`gauges.${gauge.key}.calibrated`} label="calibrated" value={gauge.calibrated} placeholder="not stated" onChange={(calibrated) => { actions.run(editGauge(gauge.key, { calibrated })); }} />
           <button type="button" className="plain remove-long" onClick={() => { actions.run(removeGauge(gauge.key)); }}>Remove this gauge</button>
         </details>
       ))}
@@ -30,6 +32,8 @@ export function InstrumentsSection() {
         Add a gauge
       </button>
       <TextField field="conditions.balanceResolution" label="balance step" value={conditions.balanceResolution} onChange={(balanceResolution) => { edit({ balanceResolution }); }} />
+      <TextField field="conditions.balance" label="balance" value={conditions.balance} placeholder="name, calibration" onChange={(balance) => { edit({ balance }); }} />
+      <TextField field="conditions.thermometer" label="thermometer" value={conditions.thermometer} placeholder="name, calibration" onChange={(thermometer) => { edit({ thermometer }); }} />
       <TextField field="conditions.roomTemperature" label="room temperature" value={conditions.roomTemperature} onChange={(roomTemperature) => { edit({ roomTemperature }); }} />
       <TextField field="conditions.relativeHumidity" label="relative humidity" value={conditions.relativeHumidity} onChange={(relativeHumidity) => { edit({ relativeHumidity }); }} />
       <TextField field="conditions.roomVolume" label="room volume" value={conditions.roomVolume} placeholder="not stated" onChange={(roomVolume) => { edit({ roomVolume }); }} />

@@ -18,7 +18,7 @@ export function FillSection() {
       <ChoiceField field="route.by" label="by" value={route.by} choices={['pressure', 'mass', 'pressure and mass']} onChange={(by) => { actions.run(editRoute({ by })); }} />
       <ChoiceField
         field="route.sequence" label="order of addition" value={route.sequence}
-        choices={[{ value: 'smallest first', text: 'smallest first' }, { value: 'as listed', text: 'as listed' }]}
+        choices={[{ value: 'best', text: 'chosen by the checks' }, { value: 'smallest first', text: 'smallest first' }, { value: 'as listed', text: 'as listed' }]}
         onChange={(sequence) => { actions.run(editRoute({ sequence })); }}
       />
       <SectionProblem field="order" />

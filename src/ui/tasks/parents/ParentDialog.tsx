@@ -1,9 +1,12 @@
-import type { Parent } from '../../../blending/index.ts';
+import type { Parent, PurityLine } from '../../../blending/index.ts';
 import { editParent, editRoute, editStep, moveParent, removeParent } from '../../../state/index.ts';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
 import { CompositionEditor } from '../../parts/CompositionEditor.tsx';
 import { Dialog } from '../../parts/Dialog.tsx';
 import { ChoiceField, PressureField, TextField } from '../../parts/Field.tsx';
+import { SupplyFields } from './SupplyFields.tsx';
+
+const blankPurity: PurityLine = { gas: '', amount: '', uncertainty: '', basis: 'certified' };
 
 /** One parent: name, supply, purity table, and the choices of its step. */
 export default function ParentDialog({ parent, onClose }: { readonly parent: Parent; readonly onClose: () => void }) {
@@ -19,8 +22,9 @@ export default function ParentDialog({ parent, onClose }: { readonly parent: Par
     <Dialog title={parent.name === '' ? 'Parent gas' : parent.name} onClose={onClose}>
       <TextField field={`${path}.name`} label="name" value={parent.name} onChange={(name) => { actions.run(editParent(parent.key, { name })); }} />
       <PressureField field={`${path}.pressure`} label="supply pressure" value={parent.pressure} placeholder="not stated" onChange={(pressure) => { actions.run(editParent(parent.key, { pressure })); }} />
+      <SupplyFields parent={parent} />
       <CompositionEditor
-        path={`${path}.composition`} legend="composition and purity table" lines={parent.composition}
+        path={`${path}.composition`} legend="composition and purity table" lines={parent.composition} blank={blankPurity}
         onChange={(composition) => { actions.run(editParent(parent.key, { composition })); }}
       />
       <p className="hint">An impurity below its limit of detection is written “&lt; 1 µmol/mol”; half of the limit is counted.</p>

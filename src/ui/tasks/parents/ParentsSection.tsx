@@ -1,4 +1,5 @@
 import { lazy, Suspense, useState } from 'react';
+import { purityTable } from '../../../blending/index.ts';
 import { addParent } from '../../../state/index.ts';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
 import { problemsOf } from '../../bindings/problems.tsx';
@@ -36,7 +37,7 @@ export function ParentsSection() {
       <button
         type="button" className="plain"
         onClick={() => {
-          actions.run(addParent({ name: '', composition: [{ gas: '', amount: 'balance' }], pressure: { typed: '', reference: 'gauge' } }));
+          actions.run(addParent({ name: '', composition: purityTable([{ gas: '', amount: 'balance' }]) }));
           setOpen('newest');
         }}
       >

@@ -1,11 +1,11 @@
-import { gasFromText, gasLabel, unstatedPressure } from '../../../blending/index.ts';
+import { gasFromText, gasLabel, purityTable } from '../../../blending/index.ts';
 import type { GasId, Parent, PlanAnswer, Recipe } from '../../../blending/index.ts';
 
 /** Pure parents that would supply what the order names and no parent holds; empty when nothing is missing. */
-export function parentForMissing(answer: PlanAnswer, recipe: Recipe): readonly Omit<Parent, 'key'>[] {
+export function parentForMissing(answer: PlanAnswer, recipe: Recipe): readonly Pick<Parent, 'name' | 'composition'>[] {
   return missingGases(answer, recipe).map((gas) => {
     const { formula } = gasLabel(gas);
-    return { name: formula, composition: [{ gas: formula, amount: 'balance' }], pressure: unstatedPressure };
+    return { name: formula, composition: purityTable([{ gas: formula, amount: 'balance' }]) };
   });
 }
 

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { gasLabel } from '../../../blending/index.ts';
+import { chooseGauge, gasLabel } from '../../../blending/index.ts';
 import type { Plan, PlanStep } from '../../../blending/index.ts';
 import { formatMass, formatNumber, formatSignificant, formatTemperature, fromPascal } from '../../../units/index.ts';
 import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
@@ -64,8 +64,7 @@ export function StepTable({ plan, columnWidth, hasStart }: StepTableProps) {
 function StartCell({ plan }: { readonly plan: Plan }) {
   if (plan.start === null) return <td>vacuum</td>;
   const { job, start } = plan;
-  const finest = job.gauges.filter((gauge) => gauge.fullScale >= start.pressure).sort((a, b) => a.accuracy - b.accuracy)[0];
-  const scale = scaleOf(job, finest?.key ?? null, start.pressure);
+  const scale = scaleOf(job, chooseGauge(job.gauges, null, start.pressure)?.key ?? null, start.pressure);
   return <td><span className="stop-start">{pressureNumber(start.pressure, scale)}</span><span className="unit">{scaleLabel(scale)}</span></td>;
 }
 

@@ -10,9 +10,9 @@ export function RecipesView({ onOpened }: { readonly onOpened: () => void }) {
   const library = useWorkspaceState((state) => state.library);
   const openId = useWorkspaceState((state) => state.openId);
   const actions = useActions();
-  const { gauges, conditions } = useWorkspaceState((state) => state.recipe);
-  // The laboratory's gauges and room are the same for the next recipe.
-  const create = () => { if (actions.create({ ...emptyRecipe, gauges, conditions }).ok) onOpened(); };
+  const { gauges, conditions, values } = useWorkspaceState((state) => state.recipe);
+  // The laboratory's gauges, room and own values are the same for the next recipe.
+  const create = () => { if (actions.create({ ...emptyRecipe, gauges, conditions, values }).ok) onOpened(); };
   return (
     <section aria-labelledby="recipes-title">
       <h2 id="recipes-title">Recipes</h2>

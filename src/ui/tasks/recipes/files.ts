@@ -1,8 +1,13 @@
-import type { ExportedFile } from '../../../state/index.ts';
+/** A text for the browser's own download; JSON unless said. */
+export interface FileToHandOut {
+  readonly fileName: string;
+  readonly text: string;
+  readonly type?: string;
+}
 
 /** Hands a file to the browser's own download. */
-export function handOutFile({ fileName, text }: ExportedFile): void {
-  const address = URL.createObjectURL(new Blob([text], { type: 'application/json' }));
+export function handOutFile({ fileName, text, type = 'application/json' }: FileToHandOut): void {
+  const address = URL.createObjectURL(new Blob([text], { type }));
   const link = document.createElement('a');
   link.href = address;
   link.download = fileName;

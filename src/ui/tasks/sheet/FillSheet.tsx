@@ -6,6 +6,8 @@ import { useWorkspaceState } from '../../bindings/workspace.tsx';
 import { amountText, parentName, pressureNumber, scaleLabel, scaleOf } from '../../parts/show.ts';
 import { openHolds, standingOverride } from '../checks/override.ts';
 import { CAUTIONS } from './cautions.ts';
+import { Label } from './Label.tsx';
+import { Preparation } from './Preparation.tsx';
 
 /** The page for the fill room. It is always drawn, and seen only on paper. */
 export function FillSheet({ program }: { readonly program: string }) {
@@ -17,6 +19,8 @@ export function FillSheet({ program }: { readonly program: string }) {
   }
   const plan = answer.value;
   const { contentId, revision } = sheetIdentity({ recipe, issued });
+  const { thermometer, balance } = recipe.conditions;
+  const instruments = [thermometer, balance].filter((words) => words !== '').map((words) => ` · ${words}`).join('');
   return (
     <article className={isDense(plan) ? 'sheet dense' : 'sheet'} aria-label="Fill sheet">
       <header className="sheet-head">
@@ -28,8 +32,10 @@ export function FillSheet({ program }: { readonly program: string }) {
       </header>
       <Holds plan={plan} />
       <OrderAndCylinder plan={plan} />
+      <Preparation plan={plan} />
       <Steps plan={plan} />
       <Finished plan={plan} />
+      <Label plan={plan} />
       <Findings plan={plan} />
       <section className="sheet-cautions">
         <h2>Cautions</h2>
@@ -38,16 +44,16 @@ export function FillSheet({ program }: { readonly program: string }) {
       <section className="sheet-signatures">
         {['Planned by, date', 'Second check, date', 'Filled by, date', 'Leak test, rolling start and end'].map((role) => <p key={role}><span>{role}</span></p>)}
       </section>
-      <footer>{program} · real gas: {modelName(plan.job.gases)} · R {plan.gasConstant} J/(mol K) · barometer {pressureNumber(plan.job.conditions.barometer, { unit: 'hPa', reference: 'absolute', resolution: 1, barometer: plan.job.conditions.barometer })} hPa absolute</footer>
+      <footer>{program} · real gas: {modelName(plan.job.gases)} · R {plan.gasConstant} J/(mol K){instruments} · barometer {pressureNumber(plan.job.conditions.barometer, { unit: 'hPa', reference: 'absolute', resolution: 1, barometer: plan.job.conditions.barometer })} hPa absolute</footer>
     </article>
   );
 }
 
 /** Whether everything must be set smaller to stay on one page. The heights are rough, in mm on Letter, the lower paper. */
-function isDense({ steps, findings }: Plan): boolean {
+function isDense({ job, steps, findings }: Plan): boolean {
   const holds = findings.filter(({ verdict }) => verdict === 'hold').length;
   const cautions = findings.filter(({ verdict }) => verdict === 'caution').length;
-  return 16 * steps.length + 5 * (holds + cautions) + (holds > 0 ? 9 + 7 * holds : 0) > 125;
+  return 16 * steps.length + 5 * job.conditioning.length + 5 * (holds + cautions) + (holds > 0 ? 9 + 7 * holds : 0) > 115;
 }
 
 function Holds({ plan }: { readonly plan: Plan }) {
@@ -97,6 +103,7 @@ function OrderAndCylinder({ plan }: { readonly plan: Plan }) {
           <tr><th scope="row">working pressure at {formatTemperature(cylinder.workingPressureTemperature)}</th><td>{at(cylinder.workingPressure)}</td></tr>
           <tr><th scope="row">test pressure</th><td>{at(cylinder.testPressure)}</td></tr>
           <tr><th scope="row">before filling</th><td>{startText(plan)}</td></tr>
+          {job.batch.cylinders > 1 && <tr><th scope="row">cylinders</th><td>{job.batch.cylinders} alike, {job.batch.together ? 'together on one manifold' : 'one after another'}</td></tr>}
           <tr><th scope="row">fill to</th><td>{at(order.fillPressure)} at {formatTemperature(order.fillTemperature)} gas temperature</td></tr>
         </tbody>
       </table>
@@ -136,10 +143,11 @@ function StepRows({ plan, step, byMass }: { readonly plan: Plan; readonly step: 
   const scale = scaleOf(plan.job, step.gauge, step.state.pressure);
   const gauge = plan.job.gauges.find((candidate) => candidate.key === step.gauge);
   const { balanceResolution } = plan.job.conditions;
+  const lot = useWorkspaceState((state) => state.recipe.parents.find(({ key }) => key === step.parent)?.lot ?? '');
   return (
     <tbody>
       <tr className="sheet-step">
-        <th scope="row">{step.number}. {parentName(plan.job, step)}</th>
+        <th scope="row">{step.number}. {parentName(plan.job, step)}{lot !== '' && <span className="lot">lot {lot}</span>}</th>
         <td className="sheet-figure">
           <strong>{pressureNumber(step.state.pressure, scale)}</strong> {scaleLabel(scale)}
           <span>at {formatTemperature(step.state.temperature)}{gauge === undefined ? '' : `, on ${gauge.name}`}</span>
@@ -180,15 +188,18 @@ function Finished({ plan }: { readonly plan: Plan }) {
 function Findings({ plan }: { readonly plan: Plan }) {
   const shown = plan.findings.filter((finding) => finding.verdict !== 'note');
   const notes = plan.findings.length - shown.length;
+  // What was replaced is named on paper even where it changed no verdict.
+  const own = plan.findings.find(({ rule, verdict }) => rule === 'laboratory-values' && verdict === 'note');
   return (
     <section className="sheet-findings">
       <h2>Checks</h2>
       <ul>{shown.map((finding) => <li key={finding.id}><FindingLine finding={finding} /></li>)}</ul>
+      {own !== undefined && <p>{own.detail}</p>}
       {notes > 0 && <p>and {notes} note{notes === 1 ? '' : 's'}; figures, limits and sources of all checks are on the screen.</p>}
     </section>
   );
 }
 
 function FindingLine({ finding }: { readonly finding: Finding }) {
-  return <>{finding.verdict === 'hold' ? '■' : '▲'} <strong>{finding.title}.</strong> {finding.remedy}</>;
+  return <>{finding.verdict === 'hold' ? '■' : '▲'} <strong>{finding.title}.</strong> {finding.remedy}{finding.replaced.length > 0 && ' (judged with the laboratory’s own value)'}</>;
 }

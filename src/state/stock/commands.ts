@@ -1,0 +1,80 @@
+import type { LaboratoryValue, Stock } from '../../blending/index.ts';
+import { freshKey } from '../command.ts';
+import type { StockCommand } from './contract.ts';
+
+/** The lists of things in the stock that have a key. */
+export type StockList = 'parents' | 'cylinders' | 'gauges' | 'thermometers' | 'balances';
+/** One thing of a list. */
+export type StockItem<List extends StockList> = Stock[List][number];
+
+/** What one thing of each list is called. */
+const words: Readonly<Record<StockList, string>> = {
+  parents: 'parent', cylinders: 'cylinder', gauges: 'gauge', thermometers: 'thermometer', balances: 'balance',
+};
+const letters: Readonly<Record<StockList, string>> = { parents: 's', cylinders: 'c', gauges: 'g', thermometers: 't', balances: 'b' };
+
+/** Adds things at the end of a list, each under a fresh key. */
+export function addStock<List extends StockList>(list: List, items: readonly Omit<StockItem<List>, 'key'>[]): StockCommand {
+  return {
+    label: () => (items.length === 1 ? `added ${words[list]}` : `added ${String(items.length)} ${list}`),
+    merge: null,
+    apply: (stock) => {
+      const all: { readonly key: string }[] = [...stock[list]];
+      for (const item of items) all.push({ ...item, key: freshKey(all, letters[list]) });
+      return { ...stock, [list]: all };
+    },
+  };
+}
+
+/** Puts other things in place of a whole list. */
+export function replaceStock<List extends StockList>(list: List, items: readonly StockItem<List>[]): StockCommand {
+  return {
+    label: () => `replaced ${list}`,
+    merge: null,
+    apply: (stock) => ({ ...stock, [list]: items }),
+  };
+}
+
+/** Changes fields of one thing; typing on in one field is one undo step. */
+export function editStock<List extends StockList>(
+  list: List, key: string, patch: Partial<Omit<StockItem<List>, 'key'>>,
+): StockCommand {
+  return {
+    label: () => `changed ${words[list]}`,
+    merge: `${list}.${key}:${Object.keys(patch).sort().join(',')}`,
+    apply: (stock) => {
+      const items: readonly { readonly key: string }[] = stock[list];
+      return { ...stock, [list]: items.map((item) => (item.key === key ? { ...item, ...patch } : item)) };
+    },
+  };
+}
+
+/** Takes one thing out of the stock. Recipes keep their copies. */
+export function removeStock(list: StockList, key: string): StockCommand {
+  return {
+    label: () => `removed ${words[list]}`,
+    merge: null,
+    apply: (stock) => {
+      const items: readonly { readonly key: string }[] = stock[list];
+      return { ...stock, [list]: items.filter((item) => item.key !== key) };
+    },
+  };
+}
+
+/** Puts the laboratory's own figure in place of a published one, for recipes from now on. */
+export function setStockValue(value: LaboratoryValue): StockCommand {
+  return {
+    label: () => 'laboratory value',
+    merge: `value:${value.id}`,
+    apply: (stock) => ({ ...stock, values: [...stock.values.filter(({ id }) => id !== value.id), value] }),
+  };
+}
+
+/** Goes back to the published figure. */
+export function putBackStockValue(id: string): StockCommand {
+  return {
+    label: () => 'put back published value',
+    merge: null,
+    apply: (stock) => ({ ...stock, values: stock.values.filter((value) => value.id !== id) }),
+  };
+}

@@ -1,0 +1,45 @@
+import type { Balance, StockCylinder, StockGauge, StockParent, Thermometer } from '../../../blending/index.ts';
+import { addGauge, addParent, editConditions, refreshParent, takeCylinder } from '../../../state/index.ts';
+import type { StockItem, StockList } from '../../../state/index.ts';
+import { useStockroom } from '../../bindings/stockroom.tsx';
+import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
+import type { ListView } from './lists.ts';
+
+/** Copies one thing of the stock into the open recipe, or brings the copy up to date. */
+export function UseButton<List extends StockList>({ view, entry }: { readonly view: ListView<List>; readonly entry: StockItem<List> }) {
+  const { tools } = useStockroom();
+  const actions = useActions();
+  switch (view.list) {
+    case 'parents':
+      return <UseParent entry={entry as StockParent} />;
+    case 'cylinders':
+      return <UseThis onUse={() => { actions.run(takeCylinder(tools.cylinderFromStock(entry as StockCylinder))); }} />;
+    case 'gauges':
+      return <UseThis onUse={() => { actions.run(addGauge(tools.gaugeFromStock(entry as StockGauge, ''))); }} />;
+    case 'thermometers':
+      return <UseThis onUse={() => { actions.run(editConditions({ thermometer: tools.thermometerWords(entry as Thermometer) })); }} />;
+    case 'balances':
+      return (
+        <UseThis
+          onUse={() => { actions.run(editConditions({ balance: tools.balanceWords(entry as Balance), balanceResolution: (entry as Balance).resolution })); }}
+        />
+      );
+    default:
+      return null;
+  }
+}
+
+function UseThis({ onUse }: { readonly onUse: () => void }) {
+  return <button type="button" className="plain" onClick={onUse}>Use</button>;
+}
+
+function UseParent({ entry }: { readonly entry: StockParent }) {
+  const { tools } = useStockroom();
+  const actions = useActions();
+  const copy = useWorkspaceState((state) => state.recipe.parents.find(({ stock }) => stock === entry.key));
+  const parent = tools.parentFromStock(entry, copy?.key ?? '');
+  if (copy === undefined) return <button type="button" className="plain" onClick={() => { actions.run(addParent(parent)); }}>Use</button>;
+  // The names of the fields come in one order, or a copy would look stale that is not.
+  if (JSON.stringify(Object.entries(copy).sort()) === JSON.stringify(Object.entries(parent).sort())) return <>in use</>;
+  return <button type="button" className="plain strong" onClick={() => { actions.run(refreshParent(copy.key, parent)); }}>Bring up to date</button>;
+}
