@@ -15,7 +15,11 @@ export function planJson(plan: Plan, recipeId: string): object {
       relativeStandardUncertainty: plan.modelUncertainty, gasConstant_J_per_molK: plan.gasConstant,
     },
     barometer_bar: job.conditions.barometer / 1e5,
+    conditioning: plan.conditioned.map(({ step, cycles, pressure, oldGas, byRule, purgeGas }) => ({
+      act: step + 1, cycles, ...pressureJson(job, pressure), oldGas_mol_per_mol: oldGas, oldGasByRule_mol_per_mol: byRule, purgeGas_mol: purgeGas,
+    })),
     start: plan.start === null ? null : stateJson(job, plan.start),
+    orderOfAddition: plan.sequence,
     steps: plan.steps.map((step) => stepJson(plan, step)),
     finished: stateJson(job, plan.finished),
     components: final.components.map((component) => ({
@@ -80,6 +84,7 @@ function stepJson({ job }: Plan, step: PlanStep): object {
     number: step.number,
     parent: step.parent,
     parentName: job.parents.find(({ key }) => key === step.parent)?.name,
+    shareOfParent_mol_per_mol: step.share,
     amount_mol: step.amount,
     mass_g: step.mass * 1e3,
     ...stateJson(job, step.state),

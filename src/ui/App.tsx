@@ -44,7 +44,7 @@ export function App({ program, prover }: { readonly program: string; readonly pr
         <Header view={view} onView={setView} />
         <OfflineNotice />
         <NoticeBar />
-        <div className={isWide ? 'workspace wide' : 'workspace'}>
+        <div className={view === 'plan' ? 'workspace' : isWide ? 'workspace beside wide' : 'workspace beside'}>
           <div className="slip" key={openId}>
             <OrderSection plan={answer.ok ? answer.value : null} />
             <FillSection />

@@ -60,7 +60,7 @@ export function recipeSentence(problem: RecipeProblem): string {
     case 'cannot-be-made':
       return `These parents cannot make the order: ${formulas(problem.gases)} cannot be met together with the rest. ${nearestSentence(problem.nearest)}`;
     case 'residual-in-the-way':
-      return `What is left in the cylinder is in the way of ${formulas(problem.gases)}. ${ventSentence(problem.ventTo, problem.barometer)}`;
+      return `What is left in the cylinder is in the way of ${formulas(problem.gases)}. ${ventSentence(problem.ventTo, problem.barometer)} Conditioning, under Route, does the arithmetic of a purge.`;
     case 'fill-pressure-too-low':
       return `The cylinder already holds ${bar(problem.residualPressure, problem.barometer)} at the fill temperature: nothing can be added up to the fill pressure asked for.`;
     case 'no-state':

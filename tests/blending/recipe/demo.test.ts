@@ -3,8 +3,8 @@ import { decodeRecipeFile, demoRecipes, encodeRecipeFile, planRecipe } from '../
 import { valueOf } from '../lab.ts';
 
 describe('demo recipes', () => {
-  it('are five, each with a name of its own', () => {
-    expect(new Set(demoRecipes.map(({ name }) => name)).size).toBe(5);
+  it('are six, each with a name of its own', () => {
+    expect(new Set(demoRecipes.map(({ name }) => name)).size).toBe(6);
   });
 
   describe.each(demoRecipes.map((recipe) => [recipe.name, recipe] as const))('%s', (_name, recipe) => {

@@ -99,5 +99,19 @@ const oxygenEnriched: Recipe = {
   gauges: [{ key: 'g1', name: 'P1', unit: 'psi', reference: 'gauge', fullScale: '3000 psi', accuracy: '0.1 %', accuracyOf: 'span', resolution: '1 psi', calibrated: '2026-09-14' }],
 };
 
+/** Fuel and oxidiser in one cylinder: nitrogen has to come between them. */
+const methaneWithOxygen: Recipe = {
+  ...bench,
+  name: 'CH₄ 1 % and O₂ 5 % in nitrogen',
+  note: 'Order of addition chosen by the checks',
+  order: {
+    components: [ordered('CH₄', '1 %', '2 %'), ordered('O₂', '5 %', '2 %'), ordered('N₂', 'balance')],
+    fillPressure: gauge('140 bar'), fillTemperature: '20 °C',
+  },
+  cylinder: benchCylinder('B-0433'),
+  parents: [methane45, oxygen50, nitrogen50],
+  route: { ...bench.route, sequence: 'best' },
+};
+
 /** Saved on the first start; the first one opens. */
-export const demoRecipes: readonly Recipe[] = [ambientSpan, carbonDioxideBlend, premixDilution, naturalGas, oxygenEnriched];
+export const demoRecipes: readonly Recipe[] = [ambientSpan, carbonDioxideBlend, premixDilution, naturalGas, oxygenEnriched, methaneWithOxygen];

@@ -38,8 +38,12 @@ export function benchCylinder(id: string, more: Partial<Cylinder> = {}): Cylinde
 }
 
 /** A parent from the laboratory's rack; pressures are gauge. */
-export function rackParent(key: string, name: string, pressure: string, composition: readonly CompositionLine[]): Parent {
-  return parentNamed(key, name, { composition: purityTable(composition), pressure: { typed: pressure, reference: 'gauge' } });
+export function rackParent(
+  key: string, name: string, pressure: string, composition: readonly CompositionLine[], said: Partial<Omit<Parent, 'key' | 'name'>> = {},
+): Parent {
+  return parentNamed(key, name, {
+    composition: purityTable(composition), pressure: { typed: pressure, reference: 'gauge' }, waterCapacity: '50 L', ...said,
+  });
 }
 
 export const nitrogen50 = rackParent('n2', 'N₂ 5.0', '200 bar', [
@@ -54,7 +58,7 @@ export const carbonDioxide48 = rackParent('co2', 'CO₂ 4.8', '50 bar', [
   { gas: 'CO₂', amount: 'balance' },
   { gas: 'N₂', amount: '< 10 µmol/mol' },
   { gas: 'H₂O', amount: '< 5 µmol/mol' },
-]);
+], { filling: 'liquefied', contentMass: '22 kg' });
 
 export const oxygen50 = rackParent('o2', 'O₂ 5.0', '180 bar', [
   { gas: 'O₂', amount: 'balance' },
@@ -66,7 +70,7 @@ export const carbonMonoxidePremix = rackParent('co', 'CO 0.5 % in N₂', '120 ba
   { gas: 'CO', amount: '0.5 %' },
   { gas: 'N₂', amount: 'balance' },
   { gas: 'O₂', amount: '< 3 µmol/mol' },
-]);
+], { waterCapacity: '10 L' });
 
 export const methane45 = rackParent('ch4', 'CH₄ 4.5', '150 bar', [
   { gas: 'CH₄', amount: 'balance' },

@@ -12,7 +12,7 @@ export function RecipesView({ onOpened }: { readonly onOpened: () => void }) {
   const actions = useActions();
   const { gauges, conditions, values } = useWorkspaceState((state) => state.recipe);
   // The laboratory's gauges, room and own values are the same for the next recipe.
-  const create = () => { if (actions.create({ ...emptyRecipe, gauges, conditions, values }).ok) onOpened(); };
+  const create = () => { if (actions.create({ ...emptyRecipe, route: { ...emptyRecipe.route, sequence: 'best' }, gauges, conditions, values }).ok) onOpened(); };
   return (
     <section aria-labelledby="recipes-title">
       <h2 id="recipes-title">Recipes</h2>

@@ -58,7 +58,7 @@ export function AdditionList({ job, order, list, onTake }: AdditionListProps) {
             {step.faults.map((fault, index) => (
               <tr key={index} className="fault">
                 <td colSpan={7}>
-                  {fault.verdict === 'none' ? '' : <VerdictMark verdict={fault.verdict} />} {faultText(job, fault, job.parents[step.parent]!.name, step.pressure)}
+                  {fault.verdict === 'none' ? '' : <VerdictMark verdict={fault.verdict} />} {faultText(job, fault, job.parents[step.parent]!.name, step.pressure).replace(/: a (?:hold|caution)$/, '')}
                 </td>
               </tr>
             ))}

@@ -33,7 +33,7 @@ export function ImportDialog<List extends StockList>({ view, onClose }: ImportDi
       <textarea id={`${id}-text`} className="input" rows={6} spellCheck={false} value={text} onChange={(event) => { setText(event.currentTarget.value); }} />
       {reading !== null && <Reading view={view} reading={reading} />}
       <p className="dialog-actions">
-        <button type="button" className="strong-button" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(false); }}>Add {reading?.entries.length ?? 0} to the stock</button>
+        <button type="button" className="strong-button" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(false); }}>Add {reading?.entries.length ?? 0} to the stock{reading !== null && reading.unread.length > 0 && `, leave ${String(reading.unread.length)} out`}</button>
         {present > 0 && <button type="button" className="plain remove-long" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(true); }}>Replace the {present} that are there</button>}
       </p>
     </Dialog>
@@ -54,7 +54,7 @@ function Reading<List extends StockList>({ view, reading }: { readonly view: Lis
   const { entries, problems, unread } = reading;
   return (
     <div role="status">
-      <p><b>{entries.length === 1 ? '1 row' : `${String(entries.length)} rows`} read</b>{unread.length > 0 && <span className="problem">, {unread.length} not taken; they stay in the text above</span>}: {entries.map((entry) => view.table.called(entry)).join(', ')}</p>
+      <p><b>{entries.length === 1 ? '1 row' : `${String(entries.length)} rows`} read</b>{unread.length > 0 && <span className="problem">, {unread.length} not taken</span>}: {entries.map((entry) => view.table.called(entry)).join(', ')}</p>
       {problems.length > 0 && <ul>{problems.map(tools.tableSentence).map((problem, index) => <li key={index} className="problem">{problem}</li>)}</ul>}
     </div>
   );

@@ -56,7 +56,12 @@ function grouped(answers: readonly ProposedAnswer[]): readonly (readonly Propose
     const parents = answer.answer.ok ? answer.answer.value.parents.map(({ stock, key }) => stock || key).sort().join(' ') : JSON.stringify(answer.answer.reason.code);
     groups.set(parents, [...(groups.get(parents) ?? []), answer]);
   }
-  return [...groups.values()];
+  // What can be filled without a hold comes first.
+  return [...groups.values()].sort((a, b) => trouble(a[0]!) - trouble(b[0]!));
+}
+
+function trouble({ answer }: ProposedAnswer): number {
+  return answer.ok ? answer.value.plan.findings.filter(({ verdict }) => verdict === 'hold').length : Infinity;
 }
 
 function Answer({ group, current, onTaken }: { readonly group: readonly ProposedAnswer[]; readonly current: boolean; readonly onTaken: () => void }) {
