@@ -15,14 +15,14 @@ const parentWords = {
   stock: 'stock entry',
 };
 
-/** Adds a parent gas at the end under a fresh key; what is left out is not stated. */
-export function addParent({ name, ...said }: Pick<Parent, 'name'> & Partial<Omit<Parent, 'key'>>): Command {
+/** Adds a parent gas at the end under a fresh key, whatever key it had; what is left out is not stated. */
+export function addParent({ name, ...said }: Pick<Parent, 'name'> & Partial<Parent>): Command {
   return {
     label: () => 'added parent',
     merge: null,
     apply: (recipe) => ({
       ...recipe,
-      parents: [...recipe.parents, parentNamed(freshKey(recipe.parents, 'p'), name, said)],
+      parents: [...recipe.parents, { ...parentNamed('', name, said), key: freshKey(recipe.parents, 'p') }],
     }),
   };
 }

@@ -29,7 +29,7 @@ export function refreshParent(key: string, entry: Omit<Parent, 'key' | 'stock'>)
   return {
     label: (before) => `${nameOf(before, key)} from stock`,
     merge: null,
-    apply: (recipe) => ({ ...recipe, parents: replaceKeyed(recipe.parents, key, (parent) => ({ ...parent, ...entry })) }),
+    apply: (recipe) => ({ ...recipe, parents: replaceKeyed(recipe.parents, key, (parent) => ({ ...parent, ...entry, key })) }),
   };
 }
 

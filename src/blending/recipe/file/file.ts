@@ -1,8 +1,9 @@
 import * as v from 'valibot';
 import { fail, ok, type Outcome } from '../../../units/index.ts';
 import type { Recipe } from '../document.ts';
+import { fieldProblem, isVersion } from './field-problem.ts';
 import { migrate, migrations, type Migrations } from './migrations.ts';
-import type { FieldFault, FileProblem } from './problem.ts';
+import type { FileProblem } from './problem.ts';
 import { recipeFileSchema, recipeFileVersion, recipeSchema } from './schema.ts';
 
 export type { FieldFault, FileProblem } from './problem.ts';
@@ -87,34 +88,3 @@ export function recipeFault(recipe: Recipe): FileProblem | null {
 }
 
 const headerSchema = v.looseObject({ format: v.literal(format) });
-
-function isVersion(version: unknown): version is number {
-  return typeof version === 'number' && Number.isSafeInteger(version) && version >= 1;
-}
-
-function fieldProblem(issue: v.BaseIssue<unknown>): FileProblem {
-  return {
-    code: 'field-invalid',
-    path: (issue.path ?? []).reduce((path, { key }) => path + pathPart(key, path === ''), ''),
-    fault: fieldFault(issue),
-    expected: issue.expected ?? '',
-    received: issue.received.slice(0, 80),
-  };
-}
-
-function pathPart(key: unknown, first: boolean): string {
-  if (typeof key === 'number') return `[${key}]`;
-  // A hostile file may have a field name of any length.
-  const name = String(key).slice(0, 80);
-  return first ? name : `.${name}`;
-}
-
-function fieldFault(issue: v.BaseIssue<unknown>): FieldFault {
-  const last = issue.path?.at(-1);
-  if (last !== undefined && 'origin' in last && last.origin === 'key') {
-    return issue.expected === 'never' ? 'unknown' : 'missing';
-  }
-  if (issue.type === 'max_length') return typeof issue.input === 'string' ? 'too-long' : 'too-many';
-  if (issue.type === 'picklist' || issue.type === 'literal') return 'not-an-option';
-  return 'wrong-type';
-}

@@ -1,8 +1,8 @@
 import * as v from 'valibot';
 import { fail, ok } from '../../../units/index.ts';
 import type { Outcome } from '../../../units/index.ts';
+import { fieldProblem, isVersion } from '../../recipe/file/field-problem.ts';
 import { parseJson } from '../../recipe/file/file.ts';
-import type { FieldFault } from '../../recipe/file/file.ts';
 import { migrate } from '../../recipe/file/migrations.ts';
 import type { Stock } from '../document.ts';
 import type { StockFileProblem } from './problem.ts';
@@ -66,10 +66,6 @@ export function stockFault(stock: Stock): StockFileProblem | null {
 
 const headerSchema = v.looseObject({ format: v.literal(format) });
 
-function isVersion(version: unknown): version is number {
-  return typeof version === 'number' && Number.isSafeInteger(version) && version >= 1;
-}
-
 /** Recipes name the entry that a parent was copied from, so a key may stand for one entry only. */
 function repeatedKey(stock: Stock, prefix: string): StockFileProblem | null {
   for (const list of ['parents', 'cylinders', 'gauges', 'thermometers', 'balances'] as const) {
@@ -80,31 +76,4 @@ function repeatedKey(stock: Stock, prefix: string): StockFileProblem | null {
     }
   }
   return null;
-}
-
-function fieldProblem(issue: v.BaseIssue<unknown>): StockFileProblem {
-  return {
-    code: 'field-invalid',
-    path: (issue.path ?? []).reduce((path, { key }) => path + pathPart(key, path === ''), ''),
-    fault: fieldFault(issue),
-    expected: issue.expected ?? '',
-    received: issue.received.slice(0, 80),
-  };
-}
-
-function pathPart(key: unknown, first: boolean): string {
-  if (typeof key === 'number') return `[${String(key)}]`;
-  // A hostile file may have a field name of any length.
-  const name = String(key).slice(0, 80);
-  return first ? name : `.${name}`;
-}
-
-function fieldFault(issue: v.BaseIssue<unknown>): FieldFault {
-  const last = issue.path?.at(-1);
-  if (last !== undefined && 'origin' in last && last.origin === 'key') {
-    return issue.expected === 'never' ? 'unknown' : 'missing';
-  }
-  if (issue.type === 'max_length') return typeof issue.input === 'string' ? 'too-long' : 'too-many';
-  if (issue.type === 'picklist' || issue.type === 'literal') return 'not-an-option';
-  return 'wrong-type';
 }
