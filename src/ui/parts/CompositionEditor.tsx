@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { CompositionLine } from '../../blending/index.ts';
 import { TextField } from './Field.tsx';
 import { GasField } from './GasField.tsx';
@@ -11,11 +12,13 @@ interface CompositionEditorProps<Line extends CompositionLine> {
   /** A line of nothing, to add. */
   readonly blank: Line;
   readonly onChange: (lines: readonly Line[]) => void;
+  /** Fields of a line beyond gas and amount. */
+  readonly more?: (line: Line, which: string, field: string, edit: (patch: Partial<Line>) => void) => ReactNode;
 }
 
 /** A short table of gas and amount, for residuals and purity tables. */
-export function CompositionEditor<Line extends CompositionLine>({ path, legend, lines, blank, onChange }: CompositionEditorProps<Line>) {
-  const edit = (index: number, patch: Partial<CompositionLine>) => {
+export function CompositionEditor<Line extends CompositionLine>({ path, legend, lines, blank, onChange, more }: CompositionEditorProps<Line>) {
+  const edit = (index: number, patch: Partial<Line>) => {
     onChange(lines.map((line, place) => (place === index ? { ...line, ...patch } : line)));
   };
   return (
@@ -25,9 +28,10 @@ export function CompositionEditor<Line extends CompositionLine>({ path, legend, 
         const field = `${path}.${String(index)}`;
         const which = `line ${String(index + 1)} of ${legend}`;
         return (
-          <div className="composition-line" key={index}>
-            <GasField field={`${field}.gas`} label={`gas, ${which}`} value={line.gas} placeholder="gas" onChange={(gas) => { edit(index, { gas }); }} />
-            <TextField bare field={`${field}.amount`} label={`amount, ${which}`} value={line.amount} placeholder="amount" onChange={(amount) => { edit(index, { amount }); }} />
+          <div className={more === undefined ? 'composition-line' : 'composition-line purity-line'} key={index}>
+            <GasField field={`${field}.gas`} label={`gas, ${which}`} value={line.gas} placeholder="gas" onChange={(gas) => { edit(index, { gas } as Partial<Line>); }} />
+            <TextField bare field={`${field}.amount`} label={`amount, ${which}`} value={line.amount} placeholder="amount" onChange={(amount) => { edit(index, { amount } as Partial<Line>); }} />
+            {more?.(line, which, field, (patch) => { edit(index, patch); })}
             <button type="button" className="plain remove" aria-label={`Remove ${which}`} onClick={() => { onChange(lines.filter((_, place) => place !== index)); }}>×</button>
           </div>
         );

@@ -62,17 +62,12 @@ export function readPurityPaste(text: string): PastedPurity {
  */
 export function readParentsPaste(text: string): TableReading<StockParent> {
   const heads = ['name', 'purity table', 'pressure', 'water capacity', 'lot', 'expiry', 'location'];
-  const reading = readTable(parentTable, text, heads);
-  const named: TableProblem[] = [];
-  const entries = reading.entries.map((entry, index) => {
+  return readTable(parentTable, text, heads, (entry, row, problems) => {
     const composition = entry.composition.length === 0 ? purityOfName(entry.name) : [];
     if (composition.length === 0) return entry;
-    named.push({
-      code: 'cell', row: index + 1, column: 1, header: 'name', text: entry.name, fault: { code: 'purity-from-name' }, taken: true,
-    });
+    problems.push({ code: 'cell', row, column: 1, header: 'name', text: entry.name, fault: { code: 'purity-from-name' }, taken: true });
     return { ...entry, composition };
   });
-  return { ...reading, entries, problems: [...reading.problems, ...named] };
 }
 
 function readLines(text: string): PastedPurity {

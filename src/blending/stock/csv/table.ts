@@ -29,9 +29,11 @@ export const largestTable = 4_000_000;
  * heads in any order and case. A row with a doubtful cell is taken with the text
  * as it stands and the doubt said; a row that cannot be taken waits in `unread`.
  * `assumed`: heads to go by where the first line has none of the known ones.
+ * `complete`: what to make of an entry once its row was read.
  */
 export function readTable<Entry extends { readonly key: string }>(
   table: Table<Entry>, text: string, assumed: readonly string[] | null = null,
+  complete: (entry: Entry, row: number, problems: TableProblem[]) => Entry = (entry) => entry,
 ): TableReading<Entry> {
   const nothing = { entries: [], unread: [] };
   if (text.length > largestTable) {
@@ -51,7 +53,7 @@ export function readTable<Entry extends { readonly key: string }>(
     if ((!isHeadless && index <= first) || cells.every((cell) => cell === '')) continue;
     const row = index + 1;
     const read = badQuotes.includes(row) ? null : readRow(table, columns, heads, cells, row, problems);
-    const entry = read === null ? null : admit(table, read, keys, row, problems, entries.length);
+    const entry = read === null ? null : admit(table, complete(read, row, problems), keys, row, problems, entries.length);
     if (entry === null) unread.push({ row, cells });
     else entries.push(entry);
   }

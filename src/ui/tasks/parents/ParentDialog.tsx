@@ -19,13 +19,19 @@ export default function ParentDialog({ parent, onClose }: { readonly parent: Par
     actions.run(editRoute({ sequence: 'as listed' }));
   };
   return (
-    <Dialog title={parent.name === '' ? 'Parent gas' : parent.name} onClose={onClose}>
+    <Dialog title={parent.name === '' ? 'Parent gas' : parent.name} onClose={onClose} wide>
       <TextField field={`${path}.name`} label="name" value={parent.name} onChange={(name) => { actions.run(editParent(parent.key, { name })); }} />
       <PressureField field={`${path}.pressure`} label="supply pressure" value={parent.pressure} placeholder="not stated" onChange={(pressure) => { actions.run(editParent(parent.key, { pressure })); }} />
       <SupplyFields parent={parent} />
       <CompositionEditor
         path={`${path}.composition`} legend="composition and purity table" lines={parent.composition} blank={blankPurity}
         onChange={(composition) => { actions.run(editParent(parent.key, { composition })); }}
+        more={(line, which, field, edit) => (
+          <>
+            <TextField bare field={`${field}.uncertainty`} label={`uncertainty, ${which}`} value={line.uncertainty} placeholder="± (k = 2)" onChange={(uncertainty) => { edit({ uncertainty }); }} />
+            <ChoiceField bare field={`${field}.basis`} label={`basis, ${which}`} value={line.basis} choices={['certified', 'typical']} onChange={(basis) => { edit({ basis }); }} />
+          </>
+        )}
       />
       <p className="hint">An impurity below its limit of detection is written “&lt; 1 µmol/mol”; half of the limit is counted.</p>
       <StepFields parent={parent} />

@@ -54,7 +54,7 @@ function ListTable<List extends StockList>({ view, entries, onOpen }: ListTableP
             <tr key={entry.key}>
               {columns.map((column, index) => {
                 const text = column.write(entry);
-                if (index > 0) return <td key={column.header}>{view.dates.includes(column.header) ? <DateCell text={text} /> : text}</td>;
+                if (index > 0) return <td key={column.header} className={text.length <= 16 ? 'short' : undefined}>{view.dates.includes(column.header) ? <DateCell text={text} /> : text}</td>;
                 return (
                   <th key={column.header} scope="row">
                     <button type="button" className="plain" onClick={() => { onOpen(entry.key); }}>{text === '' ? `unnamed ${view.one}` : text}</button>
@@ -74,5 +74,5 @@ function ListTable<List extends StockList>({ view, entries, onOpen }: ListTableP
 /** A date, and in words when it has passed or soon will. */
 function DateCell({ text }: { readonly text: string }) {
   const how = standing(text);
-  return <span className="date">{text}{how === 'passed' && <strong className="problem"> passed</strong>}{how === 'soon' && <strong className="soon"> soon</strong>}</span>;
+  return <>{text}{how === 'passed' && <strong className="problem"> passed</strong>}{how === 'soon' && <strong className="soon"> soon</strong>}</>;
 }
