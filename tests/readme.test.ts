@@ -64,7 +64,7 @@ describe('the README', () => {
 
   it('names the pictures of the tour in the order in which they are looked at', () => {
     const pictures = [...readme.matchAll(/!\[[^\]]+\]\(\.ci\/tour\/([a-z]+)\.png\)/g)].map(([, name]) => name);
-    expect(pictures).toEqual(['opening', 'order', 'hold', 'parents', 'mixing', 'sheet']);
+    expect(pictures).toEqual(['opening', 'order', 'hold', 'route', 'parents', 'stock', 'mixing', 'limits', 'sheet']);
   });
 });
 

@@ -37,7 +37,7 @@ function Answer({ plan, recipe, result, current }: { readonly plan: Plan; readon
 
 function Study({ plan, recipe, answer }: { readonly plan: Plan; readonly recipe: Recipe; readonly answer: RecipeStudy }) {
   const actions = useActions();
-  const { orderText, whySentence } = useRouteTools();
+  const { costText, criterionText, orderText, whySentence } = useRouteTools();
   const { job } = plan;
   const { study, own } = answer;
   const { counts } = study;
@@ -48,13 +48,13 @@ function Study({ plan, recipe, answer }: { readonly plan: Plan; readonly recipe:
   const ownList = listed(job, own.arrangement);
   const isBest = CRITERIA.every((criterion) => own.cost[criterion] <= study.chosen.cost[criterion]);
   const held = study.chosen.cost.holds > 0;
+  const decided = CRITERIA.find((criterion) => own.cost[criterion] !== study.chosen.cost[criterion]);
   return (
     <>
       <p role="status" className={held ? 'problem' : undefined}>
         {isBest
-          ? <>This is the best of {counts.orders.toLocaleString('en-GB')} order{counts.orders === 1 ? '' : 's'}{held ? ', and it is held: no order is clean' : ''}.</>
-          : <>A better order is known: <b>{orderText(job, study.chosen.arrangement)}</b>.</>}
-        {' '}{whySentence(job, study.why, study.chosen.cost)}
+          ? <>This is the best of {counts.orders.toLocaleString('en-GB')} order{counts.orders === 1 ? '' : 's'}{held ? ', and it is held: no order is clean' : ''}. {whySentence(job, study.why, study.chosen.cost)}</>
+          : <>A better order is known: <b>{orderText(job, study.chosen.arrangement)}</b>. {decided !== undefined && `It is better by ${criterionText[decided]}: ${costText(decided, study.chosen.cost)} against ${costText(decided, own.cost)}.`}</>}
       </p>
       <p className="dialog-actions">
         {!isBest && <button type="button" className="strong-button" onClick={() => { take(listed(job, study.chosen.arrangement)); }}>Use the best order</button>}

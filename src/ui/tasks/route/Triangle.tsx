@@ -50,7 +50,7 @@ export function Triangle({ picture, extent }: TriangleProps) {
       {picture.legs.filter(({ to }) => to.fuel + to.oxygen <= extent * 1.0001).map(({ step, to }) => <Dot key={step} place={at(to)} step={step} />)}
       <text x={MARGIN - 20} y={HEIGHT + 2 * MARGIN + 2}>inert</text>
       <text x={WIDTH - 4} y={HEIGHT + 2 * MARGIN + 2} textAnchor="end">oxidiser{edge(extent)}</text>
-      <text x={WIDTH / 2} y={MARGIN - 8} textAnchor="middle">fuel{edge(extent)}</text>
+      <text x={WIDTH / 2 - 12} y={MARGIN - 6} textAnchor="end">fuel{edge(extent)}</text>
     </svg>
   );
 }
