@@ -27,11 +27,18 @@ function schedule(delay: number, run: () => void): () => void {
   return () => { window.clearTimeout(timer); };
 }
 
-/** Orders of addition that the worker found, by the very recipe they are of. */
-const bestOrders = new WeakMap<Recipe, Arrangement>();
+/** Orders of addition that the worker found, by all that they depend on. */
+const bestOrders = new Map<string, Arrangement>();
+/** More than anybody goes back and forth between; the oldest are forgotten together. */
+const MOST_ORDERS = 50;
+
+/** Everything of a recipe that an order can depend on; who renames it need not wait for another search. */
+function orderKey(recipe: Recipe): string {
+  return JSON.stringify({ ...recipe, name: '', note: '', overrides: [] });
+}
 
 const workspace = createWorkspace({
-  planner: (recipe) => planRecipe(recipe, { arrangement: bestOrders.get(recipe) }),
+  planner: (recipe) => planRecipe(recipe, { arrangement: recipe.route.sequence === 'best' ? bestOrders.get(orderKey(recipe)) : undefined }),
   storage,
   clock,
   newId: () => Array.from(crypto.getRandomValues(new Uint8Array(8)), (byte) => byte.toString(16).padStart(2, '0')).join(''),
@@ -69,22 +76,25 @@ const calculator: Calculator = {
     asker ??= import('./worker/index.ts').then((worker) => worker.calculator());
     asker.then(
       (worker) => { if (!forgotten) forget = worker.ask(name, input, report); },
-      (error: unknown) => { report({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }); },
+      (error: unknown) => { if (!forgotten) report({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }); },
     );
     return () => { forget(); };
   },
 };
 
-let searched: Recipe | undefined;
+let searched: string | undefined;
 
 /* A recipe with too many parents to search while one types: its best order comes from the worker. */
 workspace.store.subscribe(({ recipe, answer }) => {
-  if (!answer.ok || answer.value.sequence !== 'not searched yet' || bestOrders.has(recipe) || searched === recipe) return;
-  searched = recipe;
+  if (!answer.ok || answer.value.sequence !== 'not searched yet') return;
+  const key = orderKey(recipe);
+  if (searched === key) return;
+  searched = key;
   calculator.ask('study', recipe, (result) => {
     if (result.kind !== 'answer' || !result.answer.ok) return;
-    bestOrders.set(recipe, result.answer.value.study.chosen.arrangement);
-    if (workspace.store.getState().recipe === recipe) workspace.actions.replan();
+    if (bestOrders.size >= MOST_ORDERS) bestOrders.clear();
+    bestOrders.set(key, result.answer.value.study.chosen.arrangement);
+    if (orderKey(workspace.store.getState().recipe) === key) workspace.actions.replan();
   });
 });
 

@@ -10,7 +10,7 @@ test('every demo recipe opens with its plan and prints on one page, A4 and Lette
     await test.step(recipe.name, async () => {
       await openRecipe(page, recipe.name);
       await expectStops(page, recipe);
-      for (const view of ['Finished gas', 'Mixing', 'Gases', 'Plan'] as const) {
+      for (const view of ['Route', 'Finished gas', 'Mixing', 'Stock', 'Gases', 'Limits', 'Plan'] as const) {
         await goTo(page, view);
         await expectNoBrokenNumbers(page);
       }

@@ -1,9 +1,12 @@
 import type { Locator, Page } from '@playwright/test';
-import { demoRecipes, planRecipe } from '../../src/blending/index.ts';
+import { demoRecipes, encodeRecipeFile, loadRest, planRecipe } from '../../src/blending/index.ts';
 import type { OrderLine, Parent, Plan, Recipe } from '../../src/blending/index.ts';
 import { expect } from './journey.ts';
 
 /** What the journeys do and read at the desk, by the words on the screen. */
+
+// The page plans with every equation, rule and search a moment after its start; so must what it is compared with.
+await loadRest({ patient: true });
 
 /** A demo recipe by the beginning of its name. */
 export function demo(begin: string): Recipe {
@@ -43,6 +46,13 @@ export async function openRecipe(page: Page, name: string): Promise<void> {
   await expect(page.getByLabel('Name of the recipe')).toHaveValue(name);
 }
 
+/** Brings a recipe in from a file, which opens it. */
+export async function importRecipe(page: Page, recipe: Recipe): Promise<void> {
+  await goTo(page, 'Recipes');
+  await page.getByLabel('Recipe file to import').setInputFiles({ name: 'recipe.json', mimeType: 'application/json', buffer: Buffer.from(encodeRecipeFile(recipe, '')) });
+  await expect(page.getByLabel('Name of the recipe')).toHaveValue(recipe.name);
+}
+
 export function recipeRow(page: Page, name: string): Locator {
   return page.getByRole('main').getByRole('row').filter({ has: page.getByRole('button', { name, exact: true }) });
 }
@@ -50,6 +60,22 @@ export function recipeRow(page: Page, name: string): Locator {
 /** A part of the slip by its heading. */
 export function section(page: Page, name: string): Locator {
   return page.getByRole('region', { name, exact: true });
+}
+
+/** One of the parts of the stock, by the word on its tab. */
+export async function goToStock(page: Page, part: string): Promise<void> {
+  await goTo(page, 'Stock');
+  await page.getByRole('navigation', { name: 'Parts of the stock' }).getByRole('button', { name: part }).click();
+}
+
+/** A row of the stock, by the name of the thing in it. */
+export function stockRow(page: Page, name: string): Locator {
+  return page.getByRole('main').getByRole('row').filter({ has: page.getByRole('rowheader', { name }) });
+}
+
+/** The findings of one verdict in the Checks, each with all its words. */
+export function checks(page: Page, verdict: 'hold' | 'caution' | 'note'): Locator {
+  return page.getByRole('complementary', { name: 'Checks' }).locator(`.finding.${verdict}`);
 }
 
 export async function saved(page: Page): Promise<void> {

@@ -1,4 +1,6 @@
-import { demoRecipes, gasCard, knownGases, vapourPressureAt } from '../../src/blending/index.ts';
+import { demoRecipes, knownGases } from '../../src/blending/index.ts';
+import { gasCard } from '../../src/blending/gases/card.ts';
+import { vapourPressureAt } from '../../src/blending/gases/curves.ts';
 import { kelvin } from '../../src/units/index.ts';
 import { expectNoBrokenNumbers, expectStops, goTo, section, start } from './desk.ts';
 import { expect, test } from './journey.ts';

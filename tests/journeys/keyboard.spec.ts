@@ -1,5 +1,5 @@
 import type { Locator, Page } from '@playwright/test';
-import { demoRecipes, emptyRecipe } from '../../src/blending/index.ts';
+import { demoRecipes, emptyRecipe, parentNamed, purityTable } from '../../src/blending/index.ts';
 import type { Parent, Recipe } from '../../src/blending/index.ts';
 import { expectStops, section, start, withAmount } from './desk.ts';
 import { expect, test } from './journey.ts';
@@ -14,9 +14,7 @@ async function tabTo(page: Page, target: Locator): Promise<void> {
   throw new Error(`Tab does not reach ${String(target)}.`);
 }
 
-const pure = (key: string, gas: string): Parent => ({
-  key, name: gas, composition: [{ gas, amount: 'balance' }], pressure: { typed: '', reference: 'gauge' },
-});
+const pure = (key: string, gas: string): Parent => parentNamed(key, gas, { composition: purityTable([{ gas, amount: 'balance' }]) });
 
 /** What the keyboard journey ends with. */
 const typedIn: Recipe = {

@@ -94,7 +94,7 @@ test('an order becomes a printed sheet, is kept, exported, deleted and imported'
     await recipeRow(page, first.name).getByRole('button', { name: 'Export' }).click();
     const path = await (await download).path();
     const read = decodeRecipeFile(readFileSync(path, 'utf8'));
-    expect(read).toMatchObject({ ok: true, value: { recipe: edited, version: 1 } });
+    expect(read).toMatchObject({ ok: true, value: { recipe: edited, version: 2 } });
     return path;
   });
 

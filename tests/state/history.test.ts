@@ -88,7 +88,7 @@ describe('undo and redo', () => {
         const again = redo(undo(history));
         if (history.past.length > 0) {
           expect(again.present).toEqual(history.present);
-          expect(again.past.map(({ recipe }) => recipe)).toEqual(history.past.map(({ recipe }) => recipe));
+          expect(again.past.map(({ document }) => document)).toEqual(history.past.map(({ document }) => document));
           expect(again.future).toEqual(history.future);
         }
         const forth = undo(redo(history));

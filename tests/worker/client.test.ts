@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { proofRunner } from '../../src/worker/client.ts';
-import type { WorkerLike } from '../../src/worker/client.ts';
+import type { WorkerLike } from '../../src/worker/make-worker.ts';
 import type { ProofRunner, ProofUpdate } from '../../src/blending/index.ts';
 import type { WorkerRequest } from '../../src/worker/protocol.ts';
 

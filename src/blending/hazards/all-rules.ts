@@ -1,5 +1,6 @@
 import type { HazardRule } from './rule.ts';
 import { acetylenePressure } from './rules/acetylene-pressure.ts';
+import { batchSupply } from './rules/batch-supply.ts';
 import { balanceTooCoarse } from './rules/balance.ts';
 import { carbonMonoxidePressure } from './rules/carbon-monoxide-pressure.ts';
 import { condensationAtStep } from './rules/condensation-step.ts';
@@ -31,6 +32,7 @@ import { stopAboveWorkingPressure } from './rules/stop-pressure.ts';
 import { supplyPressure } from './rules/supply.ts';
 import { testPressure, twoThirdsOfTestPressure } from './rules/test-pressure.ts';
 import { toxicGas } from './rules/toxic-gas.ts';
+import { vacuumUnlikely } from './rules/vacuum.ts';
 import { workingPressure } from './rules/working-pressure.ts';
 
 /** Every rule, the gravest subjects first; findings of equal weight keep this order. */
@@ -50,6 +52,7 @@ export const hazardRules: readonly HazardRule[] = [
   nitricOxidePressure,
   overfillNotAllowed,
   contentsNotStated,
+  vacuumUnlikely,
   oxygenEnriched,
   oxygenLine,
   oxygenCompressionHeat,
@@ -67,6 +70,7 @@ export const hazardRules: readonly HazardRule[] = [
   valveAndFittings,
   orderNotSearched,
   supplyPressure,
+  batchSupply,
   gaugeOverRange,
   gaugeTooCoarse,
   balanceTooCoarse,

@@ -7,6 +7,7 @@ import { gaugeOverRange, gaugeTooCoarse } from './rules/gauge.ts';
 import { orderNotSearched } from './rules/order-not-searched.ts';
 import { stopAboveWorkingPressure } from './rules/stop-pressure.ts';
 import { supplyPressure } from './rules/supply.ts';
+import { vacuumUnlikely } from './rules/vacuum.ts';
 import { workingPressure } from './rules/working-pressure.ts';
 
 /**
@@ -19,6 +20,7 @@ export const firstRules: readonly HazardRule[] = [
   workingPressure,
   stopAboveWorkingPressure,
   contentsNotStated,
+  vacuumUnlikely,
   condensationAtStep,
   orderNotSearched,
   supplyPressure,

@@ -40,7 +40,9 @@ export function recipeSentence(problem: RecipeProblem): string {
     case 'value-beyond':
       return `The value must lie between ${String(problem.lowest)} and ${String(problem.highest)}.`;
     case 'no-parents':
-      return 'Enter the parent gases to fill from.';
+      return 'Enter the parent gases to fill from, or let Stock, “What can be made”, choose them.';
+    case 'not-a-day':
+      return 'Write the day as 2026-12-01.';
     case 'not-a-count':
       return `Enter a whole number from 1 to ${String(problem.most)}.`;
     case 'share-outside':

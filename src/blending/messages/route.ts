@@ -11,14 +11,14 @@ import { thermoSentence } from './recipe.ts';
 
 /** A criterion by name. */
 export const criterionText: Readonly<Record<Criterion, string>> = {
-  holds: 'holds',
+  holds: 'holds of gas and pressure',
   unmeasured: 'additions that the gauge cannot tell',
-  cautions: 'cautions',
+  cautions: 'cautions of gas and pressure',
   phase: 'states that are not one gas',
   supply: 'supply pressure',
   gauge: 'gauge accuracy',
   time: 'time',
-  gas: 'gas used',
+  gas: 'gas lost in the lines',
 };
 
 /** The cost by one criterion, as shown. */
@@ -78,7 +78,7 @@ export function faultText(job: Job, fault: RouteFault, parent: string, pressure:
   const stop = shownPressure(job, pressure);
   switch (fault.code) {
     case 'together':
-      return `fuel at ${showPercent(fault.fuelOfLfl)} of its lower flammable limit stands with ${showFraction(fault.oxygen)} oxygen at ${stop}${weight(fault)}`;
+      return `${fault.finished ? 'at worst within the tolerances (assumed where none is ordered) ' : ''}fuel at ${showPercent(fault.fuelOfLfl)} of its lower flammable limit stands with ${showFraction(fault.oxygen)} oxygen at ${stop}${weight(fault)}`;
     case 'boundary':
       return `${fault.oxidiserEnters ? `oxidiser (${parent}) meets fuel` : `fuel (${parent}) meets oxidiser`}: fuel at ${showPercent(fault.fuelOfLfl)} of its lower flammable limit against ${showFraction(fault.oxygen)} oxygen${weight(fault)}`;
     case 'stop':

@@ -52,6 +52,7 @@ export function cellFaultSentence(fault: CellFault, text: string): string {
     case 'not-a-date': return `“${text}” is not a day written as 2027-03-31.`;
     case 'entry': return entrySentence(fault.problem);
     case 'gas-unknown': return `“${text}” is not one of the gases that this program can compute.`;
+    case 'gases-unknown': return `${fault.gases.map((gas) => `“${gas}”`).join(', ')} cannot be computed by this program.`;
     case 'purity-not-understood': return `no gas with an amount in ${fault.pieces.map((piece) => `“${piece}”`).join(', ')}.`;
     case 'purity-from-name': return `no purity table was given; “${text}” was taken at its word.`;
   }

@@ -13,7 +13,8 @@ import { recipeSentence, thermoSentence } from './recipe.ts';
 export { cellFaultSentence, stockFileSentence, tableSentence } from './stock-files.ts';
 
 /** Why a parent of the stock is not considered. */
-export function leftOutSentence({ name, reason }: LeftOut): string {
+export function leftOutSentence({ name: typed, reason }: LeftOut): string {
+  const name = typed.trim() === '' ? 'A parent without a name' : typed;
   switch (reason.code) {
     case 'expired': return `${name} expired on ${reason.expiry}.`;
     case 'expiry-unreadable': return `${name}: its expiry “${reason.expiry}” is not a day written as 2027-03-31, so it may have expired.`;

@@ -8,7 +8,7 @@ export interface CondensableParent {
   readonly gas: GasId;
   /** The most it can give at room temperature, absolute. */
   readonly vapourPressure: Pascal;
-  /** Whether it is taken to be liquefied: its stated pressure is (nearly) the vapour pressure, or above, or not stated. */
+  /** Whether it is taken to be liquefied: it is said to be, or its stated pressure is (nearly) the vapour pressure, or above, or not stated. */
   readonly liquefied: boolean;
 }
 
@@ -28,7 +28,10 @@ export function condensableParent({ gases, conditions }: Pick<Job, 'gases' | 'co
   if (gas === undefined) return null;
   const saturation = vapourPressure(gas, conditions.roomTemperature);
   if (!saturation.ok) return null;
-  return { gas, vapourPressure: saturation.value, liquefied: parent.pressure === null || parent.pressure >= NEARLY * saturation.value };
+  return {
+    gas, vapourPressure: saturation.value,
+    liquefied: parent.filling === 'liquefied' || parent.pressure === null || parent.pressure >= NEARLY * saturation.value,
+  };
 }
 
 /**

@@ -1,7 +1,7 @@
 import type { Outcome } from '../../units/index.ts';
 import { fail, ok } from '../../units/index.ts';
 import { flammableRow } from '../hazards/data/flammable-gases.ts';
-import { fuelOxidiserScale, limitingOxygen, pressureAllowance, together } from '../hazards/fuel-and-oxidiser.ts';
+import { fuelOxidiserScale, limitingOxygen, pointOf, pressureAllowance, together } from '../hazards/fuel-and-oxidiser.ts';
 import type { FuelOxidiserScale } from '../hazards/fuel-and-oxidiser.ts';
 import { weightedSum } from '../hazards/gas-ratio.ts';
 import { valueIn } from '../values/value.ts';
@@ -44,7 +44,7 @@ export const OXYGEN_OF_AIR = 0.209;
  * gases count as nitrogen with their Kk, never above 1, and oxidisers with their
  * Ci, as `fuel-with-oxidiser` judges; mixing two gases is a straight line then too.
  *
- * Fails with `not-both` when fuel and oxidiser never meet in it, and with
+ * Fails with `not-both` when fuel or oxidiser never comes above a trace of its limit, and with
  * `gas-not-classified` when a gas is in no table.
  */
 export function triangleOf(
@@ -62,7 +62,9 @@ export function triangleOf(
   const end = place(finished.fractions);
   const trace = valueIn(job.values, together.traceShare);
   const limit = limitingOxygen(scale.value, [finished.fractions]);
-  if (!(end.fuel > 0) || !(end.oxygen > trace * limit.fraction)) return fail({ code: 'not-both' });
+  const states = plan.steps.map((step) => pointOf(scale.value, step.state.fractions));
+  const bothThere = end.fuel > 0 && states.some(({ fuelOfLfl }) => fuelOfLfl > trace) && states.some(({ oxygen }) => oxygen > trace * limit.fraction);
+  if (!bothThere) return fail({ code: 'not-both' });
   const lowerLimit = end.fuel / fuelOfLimit(scale.value, finished.fractions);
   return ok({
     legs,

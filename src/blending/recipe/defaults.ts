@@ -59,7 +59,8 @@ export function parentNamed(key: string, name: string, said: Partial<Omit<Parent
 /** Nothing is said about the contents: the plan is held until somebody does. */
 export const defaultContents: Contents = {
   state: 'not stated',
-  pressure: unstatedPressure,
+  // A vacuum is never meant as gauge.
+  pressure: { typed: '', reference: 'absolute' },
   temperature: '20 °C',
   composition: [],
 };

@@ -1,6 +1,7 @@
 import { parseNumberText, pascal } from '../../units/index.ts';
 import { publishedOnly } from '../values/value.ts';
 import type { LaboratoryValues, OwnValue } from '../values/value.ts';
+import { isDay } from './day.ts';
 import type { LaboratoryValue } from './document.ts';
 import type { RecipeProblem } from './problem.ts';
 import { FieldReader } from './reader.ts';
@@ -8,6 +9,8 @@ import { FieldReader } from './reader.ts';
 /** Bounds of a figure: far beyond any coefficient or limit, and its reciprocal can still be computed with. */
 const LEAST = 1e-9;
 const MOST = 1e9;
+/** Tables of contents in percent, of which there is no more than all. */
+const PERCENT = /^(?:lfl|ufl|tci|loc):/;
 
 /**
  * Reads the laboratory's own values: each a bare number in the unit of what it
@@ -22,12 +25,13 @@ export function readLaboratoryValues(reader: FieldReader, values: readonly Labor
     if (own.has(id)) reader.problems.push({ code: 'key-repeated', field, key: id });
     if (source.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.source` });
     if (date.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.date` });
-    own.set(id, { value: readNumber(reader, `${field}.value`, value), source: source.trim(), date: date.trim() });
+    else if (!isDay(date.trim())) reader.problems.push({ code: 'not-a-day', field: `${field}.date` });
+    own.set(id, { value: readNumber(reader, `${field}.value`, value, PERCENT.test(id) ? 100 : MOST), source: source.trim(), date: date.trim() });
   }
   return own;
 }
 
-function readNumber(reader: FieldReader, field: string, text: string): number {
+function readNumber(reader: FieldReader, field: string, text: string, most: number): number {
   const number = parseNumberText(text);
   if (!number.ok) {
     reader.problems.push({ code: 'entry', field, problem: number.reason });
@@ -36,7 +40,7 @@ function readNumber(reader: FieldReader, field: string, text: string): number {
   const { value, rest } = number.value;
   if (rest !== '') reader.problems.push({ code: 'number-alone', field, text });
   else if (!(value > 0)) reader.problems.push({ code: 'not-positive', field });
-  else if (value < LEAST || value > MOST) reader.problems.push({ code: 'value-beyond', field, lowest: LEAST, highest: MOST });
+  else if (value < LEAST || value > most) reader.problems.push({ code: 'value-beyond', field, lowest: LEAST, highest: most });
   return value;
 }
 

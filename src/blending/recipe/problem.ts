@@ -33,6 +33,7 @@ export type RecipeProblem =
   /** More than a number stands where the unit is that of the published value. */
   | { readonly code: 'number-alone'; readonly field: FieldPath; readonly text: string }
   | { readonly code: 'value-beyond'; readonly field: FieldPath; readonly lowest: number; readonly highest: number }
+  | { readonly code: 'not-a-day'; readonly field: FieldPath }
   | { readonly code: 'not-a-count'; readonly field: FieldPath; readonly text: string; readonly most: number }
   | { readonly code: 'share-outside'; readonly field: FieldPath }
   | { readonly code: 'purge-not-above'; readonly field: FieldPath }

@@ -26,6 +26,20 @@ export function addStock<List extends StockList>(list: List, items: readonly Omi
   };
 }
 
+/** Brings things up to date by their keys, and adds those whose key is new. */
+export function mergeStock<List extends StockList>(list: List, items: readonly StockItem<List>[]): StockCommand {
+  return {
+    label: () => `imported ${list}`,
+    merge: null,
+    apply: (stock) => {
+      const present: readonly { readonly key: string }[] = stock[list];
+      const incoming = new Map(items.map((item) => [item.key, item]));
+      const added = items.filter(({ key }) => present.every((item) => item.key !== key));
+      return { ...stock, [list]: [...present.map((item) => incoming.get(item.key) ?? item), ...added] };
+    },
+  };
+}
+
 /** Puts other things in place of a whole list. */
 export function replaceStock<List extends StockList>(list: List, items: readonly StockItem<List>[]): StockCommand {
   return {

@@ -47,6 +47,7 @@ const problems: { readonly [Code in RecipeProblem['code']]: Extract<RecipeProble
   'origin-missing': { code: 'origin-missing', field },
   'number-alone': { code: 'number-alone', field, text: '4.4 %' },
   'value-beyond': { code: 'value-beyond', field, lowest: 1e-9, highest: 1e9 },
+  'not-a-day': { code: 'not-a-day', field },
   'not-a-count': { code: 'not-a-count', field, text: 'two', most: 100 },
   'share-outside': { code: 'share-outside', field },
   'purge-not-above': { code: 'purge-not-above', field },

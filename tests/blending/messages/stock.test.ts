@@ -31,6 +31,7 @@ const faults: Each<CellFault> = {
   'not-a-date': { code: 'not-a-date' },
   'entry': { code: 'entry', problem: { code: 'not-a-number', text: 'much' } },
   'gas-unknown': { code: 'gas-unknown' },
+  'gases-unknown': { code: 'gases-unknown', gases: ['Xenonite'] },
   'purity-not-understood': { code: 'purity-not-understood', pieces: ['moisture free'] },
   'purity-from-name': { code: 'purity-from-name' },
 };

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { defaultCylinder, emptyRecipe, noSplit, parentNamed } from '../../../src/blending/index.ts';
 import type { Recipe } from '../../../src/blending/index.ts';
 import { cylinderFromStock, demoStock, parentFromStock } from '../../../src/blending/stock/tools.ts';
-import { refreshParent, takeCylinder, takeParents, takeValues } from '../../../src/state/index.ts';
+import { addParent, refreshParent, takeCylinder, takeParents, takeValues } from '../../../src/state/index.ts';
 
 const rack = (key: string) => demoStock.parents.find((parent) => parent.key === key)!;
 const recipe: Recipe = {
@@ -27,6 +27,11 @@ describe('what a recipe takes from the stock', () => {
     expect(takeParents(parents).label(recipe)).toBe('parents from stock');
   });
 
+  it('one parent more: under a key that no other has, whatever key its copy came with', () => {
+    const after = addParent(parentFromStock(rack('ar'), '')).apply(addParent(parentFromStock(rack('n2'), 'p1')).apply(recipe));
+    expect(after.parents.map(({ key, stock }) => [key, stock])).toEqual([['p1', ''], ['p2', ''], ['p3', 'n2'], ['p4', 'ar']]);
+  });
+
   it('a cylinder: its marks, and nothing of what is in it', () => {
     const residual: Recipe = {
       ...recipe, cylinder: { ...defaultCylinder, contents: { ...defaultCylinder.contents, state: 'residual' }, startReading: '12 kg' },
@@ -41,7 +46,7 @@ describe('what a recipe takes from the stock', () => {
 
   it('a fresh copy of one entry, under the key it has in the recipe', () => {
     const taken: Recipe = { ...recipe, parents: [parentFromStock(rack('n2'), 'p1'), ...recipe.parents.slice(1)] };
-    const { key: _, stock: __, ...fresh } = parentFromStock({ ...rack('n2'), pressure: { typed: '20 bar', reference: 'gauge' } }, '');
+    const fresh = parentFromStock({ ...rack('n2'), pressure: { typed: '20 bar', reference: 'gauge' } }, '');
     const after = refreshParent('p1', fresh).apply(taken);
     expect(after.parents[0]).toEqual({ ...taken.parents[0], pressure: { typed: '20 bar', reference: 'gauge' } });
     expect(after.parents[0]).toMatchObject({ key: 'p1', stock: 'n2' });

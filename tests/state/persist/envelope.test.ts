@@ -31,7 +31,7 @@ const corpus: Readonly<Record<string, object | null>> = {
   'issued-missing.txt': { code: 'entry-invalid', field: 'issued' },
   'issued-revision-zero.txt': { code: 'entry-invalid', field: 'issued' },
   'recipe-missing.txt': { code: 'not-a-recipe-file' },
-  'recipe-newer-version.txt': { code: 'newer-version', version: 7, newest: 1 },
+  'recipe-newer-version.txt': { code: 'newer-version', version: 7, newest: 2 },
   'recipe-unknown-field.txt': { code: 'field-invalid', path: 'recipe.valve', fault: 'unknown' },
   'recipe-field-missing.txt': { code: 'field-invalid', path: 'recipe.parents', fault: 'missing' },
 };

@@ -15,6 +15,7 @@ import { transport } from '../rules/pressure-when-hot.ts';
 import { unorderedAbove } from '../rules/purity.ts';
 import { roomLimits } from '../rules/room.ts';
 import { underTest } from '../rules/test-pressure.ts';
+import { vacuumLimits } from '../rules/vacuum.ts';
 import { highlyToxicUpTo, toxicTrace, toxicUpTo } from '../rules/toxic-gas.ts';
 import { standInContent } from '../stand-ins.ts';
 import { liquidBelow } from '../step-condensation.ts';
@@ -99,6 +100,8 @@ const words: Readonly<Partial<Record<ValueSection, readonly (readonly [RuleValue
     [limitWithoutTolerance, 'Relative uncertainty of a step that is cautioned where no tolerance was ordered', '', OWN],
     [shareOfTolerance, 'Share of a tolerance from which the uncertainty of a step is cautioned', '', 'The expanded uncertainty, k = 2, uses the tolerance up; own choice'],
     [supplyMargin.share, 'Margin of a supply over its stop, as a share of the stop', '', PRACTICE],
+    [vacuumLimits.poor, 'Pressure from which an evacuated cylinder is cautioned', 'mbar absolute', OWN],
+    [vacuumLimits.none, 'Pressure from which what is called evacuated is held', 'mbar absolute', OWN],
     [supplyMargin.least, 'Least margin of a supply over its stop', 'bar', PRACTICE],
     [unorderedAbove.content, 'Content from which a gas that was not ordered is reported', 'mol/mol', OWN],
     [unorderedAbove.ofSmallest, 'The same as a share of the smallest ordered component', '', OWN],

@@ -12,7 +12,7 @@ import { gaugeOfFinish, showFraction, showPercent, showPressure, showShare, show
 import { judgeParentMixture, togetherVerdicts } from '../together-judgement.ts';
 import { valueIn } from '../../values/value.ts';
 import type { LaboratoryValues, RuleValue } from '../../values/value.ts';
-import { worstCase } from '../worst-case.ts';
+import { assumedTolerance, worstCase } from '../worst-case.ts';
 
 const card: RuleCard = {
   id: 'fuel-with-oxidiser',
@@ -68,7 +68,9 @@ function candidates(plan: UncheckedPlan, scale: FuelOxidiserScale): readonly Can
   const oxygen = worstCase(plan, scale.oxygen);
   list.push({
     place: { kind: 'finished gas' },
-    where: 'in the finished gas',
+    where: fuel.toleranceAssumed || oxygen.toleranceAssumed
+      ? `in the finished gas at worst, within ${showShare(valueIn(plan.job.values, assumedTolerance))} assumed where no tolerance is ordered`
+      : 'in the finished gas at worst within its tolerances',
     point: { fuelOfLfl: fuel.value, oxygen: oxygen.value },
     limit: limitingOxygen(scale, [fuel.fractions]),
     pressure: pascal(Math.max(plan.finished.pressure, plan.steps.at(-1)?.state.pressure ?? 0)),

@@ -20,18 +20,18 @@ export function checksum(text: string): string {
 
 /**
  * JSON with sorted keys and no spaces, so that equal content is equal text. For
- * values of texts, lists and records, which is all a recipe holds, this is the
+ * values of texts, yes or no, lists and records, which is all a recipe holds, this is the
  * JSON Canonicalization Scheme (RFC 8785): keys in UTF-16 order, as `sort` has it.
  */
 export function canonicalJson(value: Jsonish): string {
-  if (typeof value === 'string') return JSON.stringify(value);
+  if (typeof value === 'string' || typeof value === 'boolean') return JSON.stringify(value);
   if (isList(value)) return `[${value.map(canonicalJson).join(',')}]`;
   const fields = Object.entries(value).sort(([left], [right]) => (left < right ? -1 : 1));
   return `{${fields.map(([key, field]) => `${JSON.stringify(key)}:${canonicalJson(field as Jsonish)}`).join(',')}}`;
 }
 
 /** What a recipe is made of. */
-export type Jsonish = string | readonly Jsonish[] | object;
+export type Jsonish = string | boolean | readonly Jsonish[] | object;
 
 function isList(value: Jsonish): value is readonly Jsonish[] {
   return Array.isArray(value);

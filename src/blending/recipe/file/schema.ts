@@ -61,7 +61,7 @@ const contents = v.pipe(
       v.picklist(['evacuated', 'residual', 'not stated']),
       v.description('"not stated" plans from a vacuum and holds the plan.'),
     ),
-    pressure: v.optional(pressure('Pressure of the residual or of the vacuum; empty text: not stated.'), unstatedPressure),
+    pressure: v.optional(pressure('Pressure of the residual or of the vacuum; empty text: not stated.'), defaultContents.pressure),
     temperature: v.optional(short('Gas temperature of the residual.'), defaultContents.temperature),
     composition: v.optional(listOf(compositionLine, 'What the residual is made of.'), []),
   }),

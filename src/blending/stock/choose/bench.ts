@@ -1,11 +1,11 @@
 import { fail, ok } from '../../../units/index.ts';
 import type { Outcome } from '../../../units/index.ts';
 import type { Parent, Recipe } from '../../recipe/document.ts';
+import { isDay } from '../../recipe/day.ts';
 import type { Job, JobParent } from '../../recipe/job.ts';
 import { normaliseRecipe } from '../../recipe/normalise.ts';
 import type { RecipeProblem } from '../../recipe/problem.ts';
 import { parentFromStock } from '../copy.ts';
-import { isDay } from '../csv/column.ts';
 import type { Stock, StockParent } from '../document.ts';
 
 /** Why a parent of the stock is not considered. */

@@ -91,10 +91,18 @@ function proposalFor(
     const chosen = chooseParents(objective, frame, reduced, left);
     if (chosen === null) return fail(explain(frame, reduced, left, setAside));
     const proposed = recipeWith(recipe, chosen.sources.map(({ entry }) => entry));
-    const plan = planRecipe(proposed);
-    if (!plan.ok) return fail({ code: 'not-planned', recipe: proposed, problems: plan.reason.problems });
-    const short = round < ROUNDS ? fallingShort(proposed, plan.value) : [];
-    if (short.length === 0) return ok(proposalOf(objective, proposed, plan.value, setAside, chosen.proven));
+    const first = planRecipe(proposed);
+    if (!first.ok) return fail({ code: 'not-planned', recipe: proposed, problems: first.reason.problems });
+    // The exact amounts may need one parent less than the program chose.
+    const used = chosen.sources.filter(({ entry }) => {
+      const key = proposed.parents.find(({ stock }) => stock === entry.key)?.key;
+      return first.value.steps.some(({ parent }) => parent === key);
+    });
+    const needed = used.length === chosen.sources.length ? proposed : recipeWith(recipe, used.map(({ entry }) => entry));
+    const plan = needed === proposed ? first : planRecipe(needed);
+    if (!plan.ok) return fail({ code: 'not-planned', recipe: needed, problems: plan.reason.problems });
+    const short = round < ROUNDS ? fallingShort(needed, plan.value) : [];
+    if (short.length === 0) return ok(proposalOf(objective, needed, plan.value, setAside, chosen.proven));
     setAside.push(...short, ...short.flatMap((each) => alikeAndLower(each, reduced, left)));
   }
 }

@@ -1,6 +1,8 @@
 import { parsePressure, pascal } from '../../../units/index.ts';
 import type { EntryProblem, Outcome } from '../../../units/index.ts';
+import { findGas } from '../../../thermo/index.ts';
 import type { PressureText, PurityLine } from '../../recipe/document.ts';
+import { isDay } from '../../recipe/day.ts';
 import { recipeBounds } from '../../recipe/file/schema.ts';
 import type { CellFault } from './problem.ts';
 import { purityText, readPurityText } from './purity-text.ts';
@@ -101,7 +103,9 @@ export function purityColumn<Entry>(
       if (lines.some(({ gas, amount, uncertainty }) => Math.max(gas.length, amount.length, uncertainty.length) > limit)) {
         return { part: null, fault: { code: 'too-long', limit } };
       }
-      const fault: CellFault | null = notUnderstood.length > 0 ? { code: 'purity-not-understood', pieces: notUnderstood } : null;
+      const unknown = lines.filter(({ gas, amount }) => amount !== '' && findGas(gas) === undefined).map(({ gas }) => gas);
+      const fault: CellFault | null = notUnderstood.length > 0 ? { code: 'purity-not-understood', pieces: notUnderstood }
+        : unknown.length > 0 ? { code: 'gases-unknown', gases: unknown } : null;
       return { part: { [field]: lines } as Partial<Entry>, fault };
     },
   };
@@ -117,12 +121,6 @@ export function entryCheck(parse: (text: string) => Outcome<unknown, EntryProble
 
 /** A day as `2027-03-31`, the one form that sorts and is read alike everywhere. */
 export const dateCheck: CellCheck = (text) => (isDay(text) ? null : { code: 'not-a-date' });
-
-/** Whether a text is a day of the calendar as `2027-03-31`. */
-export function isDay(text: string): boolean {
-  const match = /^\d{4}-(\d{2})-(\d{2})$/.exec(text);
-  return match !== null && Number(match[1]) >= 1 && Number(match[1]) <= 12 && Number(match[2]) >= 1 && Number(match[2]) <= 31;
-}
 
 function pressureCell({ typed, reference }: PressureText): string {
   if (statesReference(typed)) return typed;

@@ -9,6 +9,8 @@ export type CellFault =
   | { readonly code: 'not-a-date' }
   | { readonly code: 'entry'; readonly problem: EntryProblem }
   | { readonly code: 'gas-unknown' }
+  /** Gases of a purity table that this program cannot compute. */
+  | { readonly code: 'gases-unknown'; readonly gases: readonly string[] }
   /** Pieces of a purity table in which no gas with an amount was found. */
   | { readonly code: 'purity-not-understood'; readonly pieces: readonly string[] }
   /** No purity table was given; what the name says was taken. */

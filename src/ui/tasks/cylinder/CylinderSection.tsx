@@ -41,6 +41,9 @@ export function CylinderSection() {
   );
 }
 
+/** Dry air in three parts: as one substance it would be wrong in every mixture. */
+const AIR = [{ gas: 'N₂', amount: 'balance' }, { gas: 'O₂', amount: '20.96 %' }, { gas: 'Ar', amount: '0.92 %' }] as const;
+
 function ContentsFields() {
   const contents = useWorkspaceState((state) => state.recipe.cylinder.contents);
   const actions = useActions();
@@ -49,7 +52,7 @@ function ContentsFields() {
       <ChoiceField
         field="cylinder.contents.state" label="before filling" value={contents.state}
         choices={[{ value: 'not stated', text: 'not stated' }, { value: 'evacuated', text: 'evacuated' }, { value: 'residual', text: 'holds a residual' }]}
-        onChange={(state) => { actions.run(editContents({ state })); }}
+        onChange={(state) => { actions.run(editContents(state === 'evacuated' && contents.pressure.typed === '' ? { state, pressure: { typed: '', reference: 'absolute' } } : { state })); }}
       />
       {contents.state !== 'not stated' && (
         <PressureField
@@ -65,6 +68,7 @@ function ContentsFields() {
             path="cylinder.contents.composition" legend="composition of the residual" lines={contents.composition} blank={{ gas: '', amount: '' }}
             onChange={(composition) => { actions.run(editContents({ composition })); }}
           />
+          <button type="button" className="plain" onClick={() => { actions.run(editContents({ composition: AIR })); }}>It is air</button>
         </>
       )}
       <SectionProblem field="cylinder.contents" />

@@ -73,7 +73,7 @@ function StepFields({ step, index }: { readonly step: ConditioningStep; readonly
             onChange={(parent) => { put({ ...step, parent }); }}
           />
           <PressureField field={`${path}.high`} label="up to" value={step.high} onChange={(high) => { put({ ...step, high }); }} />
-          <PressureField field={`${path}.low`} label="down to" value={step.low} onChange={(low) => { put({ ...step, low }); }} />
+          <PressureField field={`${path}.low`} label="first and each time down to" value={step.low} onChange={(low) => { put({ ...step, low }); }} />
           <TextField field={`${path}.cycles`} label="cycles" value={step.cycles} placeholder="as many as needed" onChange={(cycles) => { put({ ...step, cycles }); }} />
           <TextField field={`${path}.wanted`} label="old gas left, at most" value={step.wanted} placeholder="not asked" onChange={(wanted) => { put({ ...step, wanted }); }} />
         </>
@@ -95,7 +95,7 @@ function StepResult({ answer, step, index }: { readonly answer: PlanAnswer; read
   return (
     <p className="result-line">
       After <b>{done.cycles} cycle{done.cycles === 1 ? '' : 's'}</b> <b>{old}</b> of the gas is the old gas, at {pressure}.
-      {' '}By the rule ({ratio}){superscript(done.cycles)} = {amountText(done.byRule, 3)}; counted with the real gas and from what was there before.
+      {' '}By the rule ({ratio}){superscript(done.cycles)} = {amountText(done.byRule, 3)}; counted with the real gas, from the first going down to the low pressure on.
     </p>
   );
 }

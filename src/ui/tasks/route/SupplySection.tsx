@@ -75,7 +75,7 @@ function KnownCells({ known, many, hasBooster, show }: KnownCellsProps) {
     <>
       <td className="number">{show(known.pressure)}<small> {formatNumber(known.held, 1)} mol</small></td>
       <td className="number">{left(known.afterOne)}</td>
-      {many && <td className="number">{left(known.afterBatch)}</td>}
+      {many && <td className="number">{known.runsOutAt === null || known.cylindersBoosted !== null ? left(known.afterBatch) : 'runs out before'}</td>}
       <td className="number">{cylinders(known.cylinders)}{known.runsOutAt !== null && <small className="problem"> short at cylinder {known.runsOutAt}, {known.step === 0 ? 'purge' : `step ${String(known.step)}`} needs {show(known.stop)}</small>}</td>
       {hasBooster && <td className="number">{known.cylindersBoosted === null ? '' : cylinders(known.cylindersBoosted)}</td>}
     </>

@@ -24,12 +24,12 @@ export function TriangleSection({ plan }: { readonly plan: Plan }) {
       </div>
       <ul className="legend triangle-legend">
         <li><span className="line-key path" /> path of the fill, numbered by step; dotted: towards the gas that streams in</li>
-        <li><span className="line-key limit" /> lower flammable limit {percent(picture.value.lowerLimit)} fuel (in air, 1 bar) and limiting oxygen {percent(picture.value.limitingOxygen)} (1 bar)</li>
+        <li><span className="line-key limit" /> lower flammable limit {percent(picture.value.lowerLimit)} fuel (in air) and limiting oxygen {percent(picture.value.limitingOxygen)}, both at 1 bar absolute</li>
         <li><span className="line-key air" /> mixtures with air; squares: flammable limits on it</li>
         <li><span className="swatch held-swatch" /> mixed states here are held: fuel above {percent(picture.value.held.fuel)} with oxygen above {percent(picture.value.held.oxygen)}</li>
       </ul>
       <p className="hint">
-        The limits were measured at 1 bar and widen with pressure; no published table draws the envelope at the pressure of a cylinder, so none is drawn here.
+        The limits were measured at 1 bar absolute and widen with pressure; no published table draws the envelope at the pressure of a cylinder, so none is drawn here.
         Inert gases count as nitrogen, oxidisers as oxygen. A path outside the hatched region is not thereby harmless.
       </p>
       <div className="scroll" tabIndex={0} role="group" aria-label="States of the path">

@@ -20,7 +20,8 @@ export function FillSheet({ program }: { readonly program: string }) {
   const plan = answer.value;
   const { contentId, revision } = sheetIdentity({ recipe, issued });
   const { thermometer, balance } = recipe.conditions;
-  const instruments = [thermometer, balance].filter((words) => words !== '').map((words) => ` · ${words}`).join('');
+  const gauges = recipe.gauges.filter(({ key, calibrated }) => calibrated !== '' && plan.steps.some(({ gauge }) => gauge === key)).map(({ name, calibrated }) => `${name} calibrated ${calibrated}`);
+  const instruments = [...gauges, thermometer, balance].filter((words) => words !== '').map((words) => ` · ${words}`).join('');
   return (
     <article className={isDense(plan) ? 'sheet dense' : 'sheet'} aria-label="Fill sheet">
       <header className="sheet-head">
@@ -114,8 +115,10 @@ function OrderAndCylinder({ plan }: { readonly plan: Plan }) {
 function startText({ job }: Plan): string {
   const { contents } = job.cylinder;
   if (contents.state === 'not stated') return 'not stated';
+  if (contents.state === 'evacuated' && contents.pressure === 0) return 'evacuated';
   const pressure = pressureNumber(contents.pressure, { unit: 'mbar', reference: 'absolute', resolution: 1, barometer: job.conditions.barometer });
-  return `${contents.state === 'evacuated' ? 'evacuated to' : 'residual'} ${pressure} mbar absolute`;
+  const held = job.gases.flatMap((gas, i) => (contents.fractions[i]! > 0 ? [`${amountText(contents.fractions[i]!, 3)} ${gasLabel(gas).formula}`] : [])).join(', ');
+  return contents.state === 'evacuated' ? `evacuated to ${pressure} mbar absolute` : `residual ${pressure} mbar absolute: ${held}`;
 }
 
 function Steps({ plan }: { readonly plan: Plan }) {

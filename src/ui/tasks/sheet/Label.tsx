@@ -13,6 +13,6 @@ export function Label({ plan }: { readonly plan: Plan }) {
 }
 
 function inOneLine(suggested: SuggestedClass): string {
-  const lines = suggestionLines(suggested).map(({ code, text }) => `${code} ${text}`.trim());
+  const lines = suggestionLines(suggested).map(({ code, text }) => `${code} ${text}`.trim().replace(/\.$/, ''));
   return lines.length === 0 ? 'not a gas under pressure, no other class found.' : `${lines.join(' · ')}.`;
 }

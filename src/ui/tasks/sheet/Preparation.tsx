@@ -23,7 +23,7 @@ function actText(job: Job, act: JobConditioning): string {
   switch (act.kind) {
     case 'free': return act.text;
     case 'lower': return `Let out or pump down to ${inFull(job, act.to)}.`;
-    case 'purge': return `Purge with ${job.parents[act.parent]!.name}: up to ${inFull(job, act.high)}, down to ${inFull(job, act.low)}`;
+    case 'purge': return `Go down to ${inFull(job, act.low)}; then purge with ${job.parents[act.parent]!.name}: up to ${inFull(job, act.high)}, down to ${inFull(job, act.low)}`;
   }
 }
 

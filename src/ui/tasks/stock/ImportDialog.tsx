@@ -13,13 +13,17 @@ interface ImportDialogProps<List extends StockList> {
 /** A table from a file or the clipboard, read and shown before anything is taken. */
 export function ImportDialog<List extends StockList>({ view, onClose }: ImportDialogProps<List>) {
   const { room, commands, tools } = useStockroom();
-  const present = useStock((state) => state.stock[view.list]).length;
+  const list = useStock((state) => state.stock[view.list]) as readonly StockItem<List>[];
+  const present = list.length;
   const [text, setText] = useState('');
   const id = useId();
   const reading = text.trim() === '' ? null : readText(view, text, tools);
+  // Only a table that states its keys says which things it means.
+  const update = reading !== null && /(?:^|[\t;,"])\s*key\s*(?:[\t;,"]|$)/im.test(text.trimStart().split('\n')[0] ?? '')
+    ? reading.entries.filter(({ key }) => list.some((item) => item.key === key)).length : 0;
   const take = (replace: boolean) => {
     if (reading === null) return;
-    room.actions.run(replace ? commands.replaceStock(view.list, reading.entries) : commands.addStock(view.list, reading.entries));
+    room.actions.run(replace ? commands.replaceStock(view.list, reading.entries) : update > 0 ? commands.mergeStock(view.list, reading.entries) : commands.addStock(view.list, reading.entries));
     onClose();
   };
   return (
@@ -33,7 +37,7 @@ export function ImportDialog<List extends StockList>({ view, onClose }: ImportDi
       <textarea id={`${id}-text`} className="input" rows={6} spellCheck={false} value={text} onChange={(event) => { setText(event.currentTarget.value); }} />
       {reading !== null && <Reading view={view} reading={reading} />}
       <p className="dialog-actions">
-        <button type="button" className="strong-button" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(false); }}>Add {reading?.entries.length ?? 0} to the stock{reading !== null && reading.unread.length > 0 && `, leave ${String(reading.unread.length)} out`}</button>
+        <button type="button" className="strong-button" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(false); }}>{update > 0 ? `Bring ${String(update)} up to date` : `Add ${String(reading?.entries.length ?? 0)} to the stock`}{update > 0 && reading !== null && reading.entries.length > update && `, add ${String(reading.entries.length - update)}`}{reading !== null && reading.unread.length > 0 && `, leave ${String(reading.unread.length)} out`}</button>
         {present > 0 && <button type="button" className="plain remove-long" disabled={reading === null || reading.entries.length === 0} onClick={() => { take(true); }}>Replace the {present} that are there</button>}
       </p>
     </Dialog>

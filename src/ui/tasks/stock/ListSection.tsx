@@ -16,6 +16,13 @@ export function ListSection<List extends StockList>({ view }: { readonly view: L
   const [open, setOpen] = useState<string | null>(null);
   const [importing, setImporting] = useState(false);
   const shown = open === 'newest' ? entries.at(-1) : entries.find(({ key }) => key === open);
+  // Nothing was said of it: it was opened by mistake.
+  const close = (entry: StockItem<List>) => {
+    if (view.table.columns.every((column) => column.header === 'key' || column.write(entry) === column.write(view.table.blank))) {
+      room.actions.run(commands.removeStock(view.list, entry.key));
+    }
+    setOpen(null);
+  };
   const add = () => {
     room.actions.run(commands.addStock(view.list, [view.table.blank]));
     setOpen('newest');
@@ -31,7 +38,7 @@ export function ListSection<List extends StockList>({ view }: { readonly view: L
       {entries.length === 0
         ? <p className="hint">Nothing here yet.</p>
         : <ListTable view={view} entries={entries} onOpen={setOpen} />}
-      {shown !== undefined && <EntryDialog view={view} entry={shown} onClose={() => { setOpen(null); }} />}
+      {shown !== undefined && <EntryDialog view={view} entry={shown} onClose={() => { close(shown); }} />}
       {importing && <ImportDialog view={view} onClose={() => { setImporting(false); }} />}
     </section>
   );

@@ -1,4 +1,4 @@
-import type { Balance, StockCylinder, StockGauge, StockParent, Thermometer } from '../../../blending/index.ts';
+import type { Balance, Recipe, StockCylinder, StockGauge, StockParent, Thermometer } from '../../../blending/index.ts';
 import { addGauge, addParent, editConditions, refreshParent, takeCylinder } from '../../../state/index.ts';
 import type { StockItem, StockList } from '../../../state/index.ts';
 import { useStockroom } from '../../bindings/stockroom.tsx';
@@ -13,14 +13,15 @@ export function UseButton<List extends StockList>({ view, entry }: { readonly vi
     case 'parents':
       return <UseParent entry={entry as StockParent} />;
     case 'cylinders':
-      return <UseThis onUse={() => { actions.run(takeCylinder(tools.cylinderFromStock(entry as StockCylinder))); }} />;
+      return <UseThis isUsed={({ cylinder }) => cylinder.id === (entry as StockCylinder).id} onUse={() => { actions.run(takeCylinder(tools.cylinderFromStock(entry as StockCylinder))); }} />;
     case 'gauges':
-      return <UseThis onUse={() => { actions.run(addGauge(tools.gaugeFromStock(entry as StockGauge, ''))); }} />;
+      return <UseThis isUsed={({ gauges }) => gauges.some(({ name, fullScale }) => name === (entry as StockGauge).name && fullScale === (entry as StockGauge).fullScale)} onUse={() => { actions.run(addGauge(tools.gaugeFromStock(entry as StockGauge, ''))); }} />;
     case 'thermometers':
-      return <UseThis onUse={() => { actions.run(editConditions({ thermometer: tools.thermometerWords(entry as Thermometer) })); }} />;
+      return <UseThis isUsed={({ conditions }) => conditions.thermometer === tools.thermometerWords(entry as Thermometer)} onUse={() => { actions.run(editConditions({ thermometer: tools.thermometerWords(entry as Thermometer) })); }} />;
     case 'balances':
       return (
         <UseThis
+          isUsed={({ conditions }) => conditions.balance === tools.balanceWords(entry as Balance)}
           onUse={() => { actions.run(editConditions({ balance: tools.balanceWords(entry as Balance), balanceResolution: (entry as Balance).resolution })); }}
         />
       );
@@ -29,7 +30,9 @@ export function UseButton<List extends StockList>({ view, entry }: { readonly vi
   }
 }
 
-function UseThis({ onUse }: { readonly onUse: () => void }) {
+function UseThis({ isUsed, onUse }: { readonly isUsed: (recipe: Recipe) => boolean; readonly onUse: () => void }) {
+  const used = useWorkspaceState((state) => isUsed(state.recipe));
+  if (used) return <>in use</>;
   return <button type="button" className="plain" onClick={onUse}>Use</button>;
 }
 

@@ -2,6 +2,7 @@ import { useId, useState } from 'react';
 import { laboratoryValueProblems, recipeSentence } from '../../../blending/index.ts';
 import type { LaboratoryValue, ListedValue } from '../../../blending/index.ts';
 import { Dialog } from '../../parts/Dialog.tsx';
+import { today } from '../stock/today.ts';
 import { valueText } from './found.ts';
 
 interface OwnValueDialogProps {
@@ -21,9 +22,10 @@ export function OwnValueDialog({ published, own, onSet, onClose }: OwnValueDialo
     const problem = tried ? problems.find((each) => each.field === `values.${id}.${field}`) : undefined;
     return problem === undefined ? null : recipeSentence(problem);
   };
+  const isAhead = typed.date.trim() > today();
   const take = () => {
     setTried(true);
-    if (problems.length > 0) return;
+    if (problems.length > 0 || isAhead) return;
     onSet(typed);
     onClose();
   };
@@ -36,7 +38,7 @@ export function OwnValueDialog({ published, own, onSet, onClose }: OwnValueDialo
       </p>
       <DialogField label={unit === '' ? 'value' : `value, ${unit}`} value={typed.value} problem={problemOf('value')} onChange={(value) => { setTyped({ ...typed, value }); }} />
       <DialogField label="source" value={typed.source} problem={problemOf('source')} onChange={(text) => { setTyped({ ...typed, source: text }); }} />
-      <DialogField label="date it was read" value={typed.date} problem={problemOf('date')} onChange={(date) => { setTyped({ ...typed, date }); }} />
+      <DialogField label="date it was read" value={typed.date} problem={problemOf('date') ?? (tried && isAhead ? 'This day has not come yet.' : null)} onChange={(date) => { setTyped({ ...typed, date }); }} />
       <p className="dialog-actions"><button type="button" className="strong-button" onClick={take}>Use this value</button></p>
     </Dialog>
   );

@@ -76,6 +76,9 @@ export const scenarios: readonly UncheckedPlan[] = [
   filledWith({ silane: 0.02, nitrogen: 0.98 }, 20),
   filledWith({ oxygen: 0.21, nitrogen: 0.79 }, 100),
   filledWith({ nitrogen: 1 }, 2.9),
+  ...[0.015, 0.3].map((vacuum) => filledWith({ nitrogen: 1 }, 100, {
+    cylinder: { contents: { state: 'evacuated', pressure: bar(vacuum), temperature: celsius(20), fractions: Float64Array.of(1) } },
+  })),
   ...toxicGases.map((gas) => filledWith({ [gas]: 0.01, nitrogen: 0.99 }, 100, { conditions: { roomVolume: 20 as never } })),
   ...fillingDensities.map(({ gas, from }) => liquefied(gas as GasId, { service: from })),
   ...fillingRatios.map(({ gas, from }) => liquefied(gas as GasId, { test: from })),

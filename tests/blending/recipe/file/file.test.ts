@@ -68,7 +68,7 @@ describe('decodeRecipeFile', () => {
     expect(recipe.cylinder.material).toBe('rigid');
     expect(recipe.cylinder.workingPressureTemperature).toBe('15 °C');
     expect(recipe.cylinder.contents).toEqual({
-      state: 'evacuated', pressure: { typed: '', reference: 'gauge' }, temperature: '20 °C', composition: [],
+      state: 'evacuated', pressure: { typed: '', reference: 'absolute' }, temperature: '20 °C', composition: [],
     });
     expect(recipe.route.sequence).toBe('as listed');
     expect(recipe.route.steps).toEqual([

@@ -60,5 +60,7 @@ describe('a list of parents pasted from a spreadsheet', () => {
       { name: 'House gas', composition: [] },
     ]);
     expect(problems).toMatchObject([{ row: 1, fault: { code: 'purity-from-name' } }, { row: 2, fault: { code: 'purity-from-name' } }]);
+    // With a head and an empty line the rows are those of the spreadsheet.
+    expect(readParentsPaste('name\tpressure\n\t\nAr 5.0\t150 bar').problems).toMatchObject([{ row: 3, fault: { code: 'purity-from-name' } }]);
   });
 });
