@@ -74,6 +74,7 @@ const calculator: Calculator = {
     let forget = () => { forgotten = true; };
     let forgotten = false;
     asker ??= import('./worker/index.ts').then((worker) => worker.calculator());
+    asker.catch(() => { asker = undefined; });
     asker.then(
       (worker) => { if (!forgotten) forget = worker.ask(name, input, report); },
       (error: unknown) => { if (!forgotten) report({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }); },
@@ -106,7 +107,11 @@ async function makeStock() {
   return { room, commands, tools };
 }
 let stock: ReturnType<typeof makeStock> | undefined;
-const openStock = () => (stock ??= makeStock());
+const openStock = () => (stock ??= makeStock().catch((error: unknown) => {
+  // A part that could not be fetched may come the next time.
+  stock = undefined;
+  throw error;
+}));
 
 const root = document.getElementById('root');
 if (root === null) throw new Error('index.html has no element with the id "root".');

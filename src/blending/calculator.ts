@@ -1,6 +1,7 @@
 /** How a screen asks for what takes longer than a frame or two, without knowing on which thread it is worked out. */
 import type { Outcome } from '../units/index.ts';
 import type { Recipe } from './recipe/document.ts';
+import type { Job } from './recipe/job.ts';
 import type { BenchProblem } from './stock/choose/bench.ts';
 import type { Proposals } from './stock/choose/propose.ts';
 import type { Stock } from './stock/document.ts';
@@ -8,6 +9,8 @@ import type { JudgedOrder, OrderProblem, OrderStudy } from './route/data.ts';
 
 /** The orders of addition of a recipe, and what the order that it states itself costs beside the best. */
 export interface RecipeStudy {
+  /** The recipe as it was studied: the orders name its parents by their index. */
+  readonly job: Job;
   readonly study: OrderStudy;
   /** The order of the recipe as it is; the chosen one where the recipe asks for the best. */
   readonly own: JudgedOrder;

@@ -1,7 +1,9 @@
 import { celsius } from '../units/index.ts';
 import type { Pascal } from '../units/index.ts';
-import { lowestGasTemperature, modelName } from '../blending/index.ts';
+import { loadCurves, modelName } from '../blending/index.ts';
 import type { CylinderState, Job, LargestFill, Mixing, MixingSplit, Plan, PlanStep, StripPoint } from '../blending/index.ts';
+
+const { lowestGasTemperature } = await loadCurves();
 
 /** A plan as plain JSON, every number with its unit in its name. */
 export function planJson(plan: Plan, recipeId: string): object {

@@ -14,6 +14,7 @@ import { OrderSection } from './tasks/order/OrderSection.tsx';
 import { ParentsSection } from './tasks/parents/ParentsSection.tsx';
 import { PlanView } from './tasks/plan/PlanView.tsx';
 import { useProofRun } from './tasks/proof/use-proof-run.ts';
+import { ErrorBoundary } from './parts/ErrorBoundary.tsx';
 import { useUndoKeys } from './undo-keys.ts';
 
 // Nobody needs these for the first plan.
@@ -53,17 +54,19 @@ export function App({ program, prover }: { readonly program: string; readonly pr
             <InstrumentsSection />
           </div>
           <main className="middle" id="main">
-            {view === 'plan' && <PlanView answer={answer} />}
-            <Suspense fallback={null}>
-              {view === 'route' && <RouteView answer={answer} />}
-              {view === 'finished' && <FinishedView answer={answer} />}
-              {view === 'mixing' && <MixingView answer={answer} />}
-              {view === 'recipes' && <RecipesView onOpened={() => { setView('plan'); }} />}
-              {view === 'stock' && <StockView onTaken={() => { setView('plan'); }} />}
-              {view === 'gases' && <GasesView />}
-              {view === 'values' && <ValuesView />}
-              {view === 'proof' && <ProofView proof={proof} />}
-            </Suspense>
+            {view === 'plan' && <PlanView answer={answer} onView={setView} />}
+            <ErrorBoundary key={view}>
+              <Suspense fallback={null}>
+                {view === 'route' && <RouteView answer={answer} />}
+                {view === 'finished' && <FinishedView answer={answer} />}
+                {view === 'mixing' && <MixingView answer={answer} />}
+                {view === 'recipes' && <RecipesView onOpened={() => { setView('plan'); }} />}
+                {view === 'stock' && <StockView onTaken={() => { setView('plan'); }} />}
+                {view === 'gases' && <GasesView />}
+                {view === 'values' && <ValuesView />}
+                {view === 'proof' && <ProofView proof={proof} />}
+              </Suspense>
+            </ErrorBoundary>
           </main>
           {!isWide && <aside className="checks" aria-label="Checks"><ChecksPanel answer={answer} /></aside>}
         </div>

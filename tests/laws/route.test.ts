@@ -10,6 +10,7 @@ import { routeProblem } from '../../src/blending/route/problem.ts';
 import type { RouteProblem } from '../../src/blending/route/problem.ts';
 import { costOfOrder, SPLIT_SHARES, studyOrders } from '../../src/blending/route/study.ts';
 import { valueOf } from '../blending/lab.ts';
+import { bar } from '../fixtures/unchecked-plan.ts';
 import { neededParents, permutations, randomRoutes } from '../blending/route/random-route.ts';
 import type { Route } from '../blending/route/random-route.ts';
 
@@ -57,6 +58,7 @@ describe('the lattice of subsets', () => {
   }, 60_000);
 
   it('finds the best of all orders with the balance gas in two parts', () => {
+    let compared = 0;
     for (const route of routes.filter((each) => neededParents(each).length <= 4).slice(0, 40)) {
       const problem = problemOf(route);
       const needed = neededParents(route);
@@ -71,11 +73,14 @@ describe('the lattice of subsets', () => {
         const best = new Lattice(problem, { position, share }).best();
         const cost = best === null ? null : valueOf(judgeOrder(problem, best)).cost;
         expect(cost).toEqual(leastCost(problemOf(route), orders));
+        compared += Number(cost !== null);
       }
     }
+    expect(compared).toBeGreaterThan(50);
   });
 
   it('finds the second best order as well', () => {
+    let compared = 0;
     for (const route of routes.filter((each) => neededParents(each).length <= 5).slice(0, 60)) {
       const { job, model, vessel, amounts } = route;
       const study = studyOrders(job, model, vessel, amounts, { splits: 'never' });
@@ -83,10 +88,13 @@ describe('the lattice of subsets', () => {
       const { chosen, why } = study.value;
       const others = permutations(neededParents(route)).map(whole).filter((order) => JSON.stringify(order) !== JSON.stringify(chosen.arrangement));
       expect(why.runnerUp?.cost ?? null).toEqual(leastCost(problemOf(route), others));
+      compared += Number(why.runnerUp !== null);
     }
+    expect(compared).toBeGreaterThan(40);
   });
 
   it('answers the same whatever the order in which the parents are listed', () => {
+    let compared = 0;
     for (const route of routes.slice(0, 60)) {
       const { job, model, vessel, amounts } = route;
       const shuffled = job.parents.map((_, k) => k).reverse();
@@ -99,10 +107,13 @@ describe('the lattice of subsets', () => {
       const keysOf = (parents: typeof job.parents, order: Arrangement): unknown => order.map(({ parent, share }) => [parents[parent]!.key, share]);
       expect(keysOf(turned.parents, again.value.chosen.arrangement)).toEqual(keysOf(job.parents, study.value.chosen.arrangement));
       expect(again.value.chosen.cost).toEqual(study.value.chosen.cost);
+      compared += 1;
     }
+    expect(compared).toBeGreaterThan(50);
   });
 
   it('passes the states that the plan of its order passes, and brings all that was to be added', () => {
+    let compared = 0;
     for (const { job, model, vessel, amounts } of routes.slice(0, 60)) {
       const study = studyOrders(job, model, vessel, amounts, { splits: 'always' });
       if (!study.ok) continue;
@@ -117,12 +128,14 @@ describe('the lattice of subsets', () => {
       plan.steps.at(-1)!.state.amounts.forEach((amount, i) => {
         expect(Math.abs(amount - amounts.finished[i]!)).toBeLessThan(1e-12 * amounts.total);
       });
+      compared += 1;
     }
+    expect(compared).toBeGreaterThan(50);
   }, 60_000);
 });
 
 /** The rules whose decisions the search shares. */
-const judgedByBoth = ['fuel-with-oxidiser', 'fuel-meets-oxidiser', 'stop-above-working-pressure', 'condensation-at-step', 'supply-pressure'];
+const judgedByBoth = ['fuel-with-oxidiser', 'fuel-meets-oxidiser', 'stop-above-working-pressure', 'condensation-at-step', 'supply-pressure', 'batch-supply'];
 
 function counted(findings: readonly Finding[], rules: readonly string[], verdict: Finding['verdict']): number {
   return findings.filter((finding) => finding.verdict === verdict && rules.includes(finding.rule)).length;
@@ -131,8 +144,11 @@ function counted(findings: readonly Finding[], rules: readonly string[], verdict
 describe('the study of an order and the rules that judge the plan', () => {
   it('count the same holds and cautions for 100 fills, in the order listed, in another, and with a split', () => {
     let compared = 0;
+    const seen = { empties: 0, boosted: 0 };
     for (const [k, route] of routes.slice(0, 100).entries()) {
-      const { job, model, vessel, amounts } = route;
+      const { model, vessel, amounts } = route;
+      // Every second has a booster.
+      const job = k % 2 === 0 ? { ...route.job, batch: { ...route.job.batch, boosterInlet: bar(10) } } : route.job;
       const orders = permutations(neededParents(route)).map(whole);
       const [first] = orders;
       const split: Arrangement = [{ parent: first!.at(-1)!.parent, share: 0.5 }, ...first!.slice(0, -1), { parent: first!.at(-1)!.parent, share: 0.5 }];
@@ -148,12 +164,16 @@ describe('the study of an order and the rules that judge the plan', () => {
           unmeasured: counted(findings, ['gauge-too-coarse'], 'hold'),
         });
         compared += 1;
+        seen.empties += counted(findings, ['batch-supply'], 'hold');
+        seen.boosted += counted(findings, ['batch-supply'], 'note');
       }
     }
     expect(compared).toBeGreaterThan(250);
+    for (const count of Object.values(seen)) expect(count).toBeGreaterThan(4);
   }, 60_000);
 
   it('count the same for the list of parents itself, permuted', () => {
+    let compared = 0;
     for (const { job, model, vessel, amounts } of routes.slice(100, 130)) {
       const listed = { ...job, parents: job.parents.toReversed() };
       const plan = planJob(listed, 'as listed');
@@ -163,6 +183,8 @@ describe('the study of an order and the rules that judge the plan', () => {
       if (!plan.ok || !judged.ok) continue;
       expect(judged.value.cost.holds).toBe(counted(plan.value.findings, judgedByBoth, 'hold'));
       expect(judged.value.cost.cautions).toBe(counted(plan.value.findings, judgedByBoth, 'caution'));
+      compared += 1;
     }
+    expect(compared).toBeGreaterThan(25);
   });
 });

@@ -4,6 +4,7 @@ import { parentNamed } from '../../src/blending/index.ts';
 import type { Plan, StockParent } from '../../src/blending/index.ts';
 import { nonNegativeLeastSquares } from '../../src/blending/plan/least-squares.ts';
 import { emptyStock } from '../../src/blending/stock/document.ts';
+import { supplyOf } from '../../src/blending/supply/index.ts';
 import { objectives, proposeFromStock } from '../../src/blending/stock/tools.ts';
 import type { Impossible, SetAside } from '../../src/blending/stock/tools.ts';
 import { realModel } from '../../src/thermo/index.ts';
@@ -101,6 +102,7 @@ function checkPlan({ order, parents, left }: Problem, plan: Plan): void {
     } else expect(Math.abs(off)).toBeLessThan(1e-7);
   });
   expect(plan.findings.filter(({ rule, verdict }) => rule === 'supply-pressure' && verdict === 'hold')).toEqual([]);
+  expect(supplyOf(plan).lasts ?? Infinity).toBeGreaterThanOrEqual(1);
 }
 
 interface System { readonly a: number[][]; readonly b: number[] }
@@ -190,7 +192,7 @@ describe('500 random orders against a random stock', () => {
         return;
       }
       const { reason } = answer;
-      if (reason.code !== 'impossible') throw new Error(JSON.stringify(reason.problems));
+      if (reason.code !== 'impossible') throw new Error(JSON.stringify(reason));
       const { shortage } = reason;
       count(shortage.code);
       if (reason.setAside.length > 0) count('set aside, then impossible');

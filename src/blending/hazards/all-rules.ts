@@ -5,6 +5,11 @@ import { balanceTooCoarse } from './rules/balance.ts';
 import { carbonMonoxidePressure } from './rules/carbon-monoxide-pressure.ts';
 import { condensationAtStep } from './rules/condensation-step.ts';
 import { condensationInStorage } from './rules/condensation-storage.ts';
+import { conditioningLine } from './rules/conditioning-line.ts';
+import { conditioningFuelAndOxidiser } from './rules/conditioning-meeting.ts';
+import { conditioningIncompatiblePair } from './rules/conditioning-pair.ts';
+import { conditioningPressure } from './rules/conditioning-pressure.ts';
+import { conditioningLevel, conditioningSupply } from './rules/conditioning-purge.ts';
 import { contentsNotStated } from './rules/contents.ts';
 import { cylinderMaterial } from './rules/cylinder-material.ts';
 import { fillingDensity, fillingRatio } from './rules/filling.ts';
@@ -39,11 +44,14 @@ import { workingPressure } from './rules/working-pressure.ts';
 export const hazardRules: readonly HazardRule[] = [
   fuelWithOxidiser,
   fuelMeetsOxidiser,
+  conditioningFuelAndOxidiser,
   incompatiblePair,
+  conditioningIncompatiblePair,
   acetylenePressure,
   workingPressure,
   testPressure,
   stopAboveWorkingPressure,
+  conditioningPressure,
   twoThirdsOfTestPressure,
   pressureAt55,
   fillingDensity,
@@ -53,8 +61,10 @@ export const hazardRules: readonly HazardRule[] = [
   overfillNotAllowed,
   contentsNotStated,
   vacuumUnlikely,
+  conditioningLevel,
   oxygenEnriched,
   oxygenLine,
+  conditioningLine,
   oxygenCompressionHeat,
   toxicGas,
   hazardZone,
@@ -70,6 +80,7 @@ export const hazardRules: readonly HazardRule[] = [
   valveAndFittings,
   orderNotSearched,
   supplyPressure,
+  conditioningSupply,
   batchSupply,
   gaugeOverRange,
   gaugeTooCoarse,

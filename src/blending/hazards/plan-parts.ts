@@ -1,10 +1,14 @@
 import type { CylinderState, UncheckedPlan } from '../plan/plan.ts';
 import type { JobParent } from '../recipe/job.ts';
 
-/** The parents that the steps of a plan draw from, each once, in the order of use. */
-export function usedParents(plan: UncheckedPlan): readonly JobParent[] {
-  const keys = [...new Set(plan.steps.map((step) => step.parent))];
-  return keys.flatMap((key) => plan.job.parents.filter((parent) => parent.key === key));
+/** The parents that the purges and the steps of a plan draw from, each once, in the order of use. */
+export function usedParents({ job, conditioned, steps }: UncheckedPlan): readonly JobParent[] {
+  const purging = conditioned.flatMap(({ step, purgeGas }) => {
+    const act = job.conditioning[step];
+    return act?.kind === 'purge' && purgeGas > 0 ? [job.parents[act.parent]!.key] : [];
+  });
+  const keys = [...new Set([...purging, ...steps.map((step) => step.parent)])];
+  return keys.flatMap((key) => job.parents.filter((parent) => parent.key === key));
 }
 
 /** The parent of a step, or undefined when the plan does not know it. */

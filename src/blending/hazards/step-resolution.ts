@@ -27,14 +27,17 @@ export function balanceUncertainty(plan: Pick<UncheckedPlan, 'job'>): number {
   return plan.job.conditions.balanceResolution * Math.sqrt(2 / 12);
 }
 
-/** Tolerance that a step has to serve: that of the largest ordered part of its parent; null when none was stated. */
+/**
+ * Tolerance that a step has to serve: that of the ordered gas that its parent is there for, of which it
+ * holds the most beside what is wanted; null when none was stated.
+ */
 export function toleranceOfStep(plan: Pick<UncheckedPlan, 'job'>, step: Pick<PlanStep, 'parent'>): number | null {
   const parent = parentOf(plan, step.parent);
   if (!parent) return null;
   let largest = 0;
   let tolerance: number | null = null;
   for (const component of plan.job.order.components) {
-    const content = parent.fractions[component.gas] ?? 0;
+    const content = (parent.fractions[component.gas] ?? 0) / component.nominal;
     if (content > largest) {
       largest = content;
       tolerance = component.tolerance;

@@ -1,6 +1,7 @@
 import type { Pascal } from '../../units/index.ts';
 import type { CondensableParent } from '../phase/liquefied.ts';
 import type { JobParent } from '../recipe/job.ts';
+import { neededPressure } from '../supply/needed-pressure.ts';
 import { exceeds } from './pressure-limits.ts';
 import { valueIn } from '../values/value.ts';
 import type { LaboratoryValues, RuleValue } from '../values/value.ts';
@@ -10,7 +11,7 @@ import type { LaboratoryValues, RuleValue } from '../values/value.ts';
  * judges exactly as the finished plan is judged.
  */
 
-/** What is wrong with a parent at its highest stop. */
+/** What is wrong with a parent at a stop. */
 export interface SupplyJudgement {
   readonly verdict: 'caution' | 'hold';
   readonly code: 'too-low' | 'margin' | 'not-stated';
@@ -18,6 +19,8 @@ export interface SupplyJudgement {
   readonly liquefied: boolean;
   /** What it stands at, absolute; null: not stated. */
   readonly pressure: Pascal | null;
+  /** What it has to stand above, absolute: the stop, or the inlet of the booster that carries it there. */
+  readonly needed: Pascal;
 }
 
 /** Margin over a stop: a share of it, and at least this many bar. */
@@ -31,14 +34,19 @@ export function marginOf(stop: number, values: LaboratoryValues): number {
   return Math.max(valueIn(values, margin.share) * stop, Math.min(valueIn(values, margin.least) * 1e5, stop));
 }
 
-/** Judges what a parent stands at against a stop (absolute); `condensable` as of `condensableParent`. Null: high enough. */
+/**
+ * Judges what a parent stands at against a stop, or against the inlet of a booster (null: there is none);
+ * all absolute, `condensable` as of `condensableParent`. Null: high enough.
+ */
 export function judgeSupply(
-  parent: Pick<JobParent, 'pressure'>, condensable: CondensableParent | null, stop: Pascal, values: LaboratoryValues,
+  parent: Pick<JobParent, 'pressure'>, condensable: CondensableParent | null, stop: Pascal, inlet: Pascal | null, values: LaboratoryValues,
 ): SupplyJudgement | null {
   const liquefied = condensable?.liquefied === true;
   const pressure = condensable?.liquefied === true ? condensable.vapourPressure : parent.pressure;
-  if (pressure === null) return { verdict: 'caution', code: 'not-stated', liquefied, pressure };
-  if (exceeds(stop, pressure)) return { verdict: 'hold', code: 'too-low', liquefied, pressure };
-  if (pressure < stop + marginOf(stop, values)) return { verdict: 'caution', code: 'margin', liquefied, pressure };
-  return parent.pressure === null ? { verdict: 'caution', code: 'not-stated', liquefied, pressure } : null;
+  const needed = neededPressure(condensable, stop, inlet);
+  const said = { liquefied, pressure, needed };
+  if (pressure === null) return { verdict: 'caution', code: 'not-stated', ...said };
+  if (exceeds(needed, pressure)) return { verdict: 'hold', code: 'too-low', ...said };
+  if (pressure < needed + marginOf(needed, values)) return { verdict: 'caution', code: 'margin', ...said };
+  return parent.pressure === null ? { verdict: 'caution', code: 'not-stated', ...said } : null;
 }

@@ -5,6 +5,7 @@ export * as materialWords from './hazards/material.ts';
 export * as compositionWords from './hazards/composition.ts';
 export * as storageWords from './hazards/storage.ts';
 export * as hotWords from './hazards/pressure-when-hot.ts';
+export * as conditioningWords from './hazards/conditioning.ts';
 export * as batchWords from './hazards/batch.ts';
 export * as toxicityWords from './hazards/toxicity.ts';
 export * as releaseWords from './hazards/release.ts';

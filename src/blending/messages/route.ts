@@ -96,7 +96,7 @@ export function faultText(job: Job, fault: RouteFault, parent: string, pressure:
     case 'not-gas':
       return fault.phase === 'unstable' ? `the state at ${stop} is not one gas` : `the state at ${stop} could not be shown to be one gas`;
     case 'falls':
-      return `${parent} falls to ${shownPressure(job, fault.left)} as it is drawn, ${fault.grade === 2 ? 'below' : 'close to'} the stop of ${stop}`;
+      return `${parent} falls to ${shownPressure(job, fault.left)} as it is drawn, ${fault.grade === 2 ? 'below' : 'close to'} the stop of ${stop}${weight(fault)}`;
   }
 }
 

@@ -38,6 +38,9 @@ export function impossibleSentences({ shortage, nearest, remedies }: Impossible,
   ];
 }
 
+/** Why it is not said whether the stock can fill the order. */
+export const undecidedSentence = 'It could not be decided whether the stock can fill this order: neither search came to an end. Choose the parents by hand.';
+
 /** What is missing. */
 export function shortageSentence(shortage: Shortage, nameOf: (parent: string) => string): string {
   switch (shortage.code) {

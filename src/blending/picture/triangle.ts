@@ -36,9 +36,6 @@ export interface TrianglePicture {
   readonly held: TrianglePoint;
 }
 
-/** Oxygen in air, as a fraction, on the right-hand side of the triangle. */
-export const OXYGEN_OF_AIR = 0.209;
-
 /**
  * The path of a plan in the triangle of fuel, oxidiser and inert gas. Inert
  * gases count as nitrogen with their Kk, never above 1, and oxidisers with their

@@ -56,20 +56,14 @@ const MAXIMUM_ROUNDS = 40;
  * plan to report.
  */
 export function solveAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<FillAmounts, AmountProblem> {
-  const { fillPressure, fillTemperature } = job.order;
   const conditioned = conditionedResidual(job, model, vessel);
   if (!conditioned.ok) {
     const { reason } = conditioned;
     return fail(reason.code === 'purge-never-ends' ? reason : { code: 'state', where: 'residual', reason });
   }
   const { contents: residual, steps } = conditioned.value;
-  const held = totalAmount(residual);
-  if (held > 0) {
-    const warm = settle(model, vessel, residual, fillTemperature);
-    if (warm.ok && warm.value.pressure >= fillPressure) {
-      return fail({ code: 'fill-pressure-too-low', residualPressure: warm.value.pressure });
-    }
-  }
+  const above = residualAbove(job, model, vessel, residual);
+  if (above !== null) return fail({ code: 'fill-pressure-too-low', residualPressure: above });
   const met = meetOrder(job, model, vessel, residual);
   if (met.ok) return ok({ ...met.value, residual, conditioned: steps, total: mole(totalAmount(met.value.finished)) });
   return fail(met.reason.code === 'missed' ? explainMiss(job, model, vessel, residual, met.reason) : met.reason);
@@ -116,12 +110,20 @@ function residualAmounts(job: Job, model: ThermoModel, vessel: Vessel): Outcome<
   return amountsAt(model, vessel, contents.pressure, contents.temperature, contents.fractions);
 }
 
-/** The same after its conditioning. */
-function conditionedResidual(job: Job, model: ThermoModel, vessel: Vessel): Outcome<Conditioned, ConditioningProblem> {
+/** What is in the cylinder once it is conditioned, mol, aligned with `Job.gases`, and what each act did. */
+export function conditionedResidual(job: Job, model: ThermoModel, vessel: Vessel): Outcome<Conditioned, ConditioningProblem> {
   const found = residualAmounts(job, model, vessel);
   return found.ok
     ? conditionCylinder(model, vessel, job.conditioning, job.parents, found.value, job.cylinder.contents.temperature)
     : found;
+}
+
+/** Absolute pressure of the residual at the fill temperature where that leaves no room for the fill; null: there is room. */
+export function residualAbove(job: Job, model: ThermoModel, vessel: Vessel, residual: Float64Array): Pascal | null {
+  const { fillPressure, fillTemperature } = job.order;
+  if (!(totalAmount(residual) > 0)) return null;
+  const warm = settle(model, vessel, residual, fillTemperature);
+  return warm.ok && warm.value.pressure >= fillPressure ? pascal(warm.value.pressure) : null;
 }
 
 function amountsAt(

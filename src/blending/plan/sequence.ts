@@ -31,7 +31,8 @@ function whole(parent: number): Arrangement[number] {
 /** A split whose early part would come straight before, or after, its own rest is no split. */
 function asListed({ split }: Job, needed: readonly number[]): Arrangement {
   if (split === null) return needed.map(whole);
-  const place = split.before === null ? 0 : needed.indexOf(split.before);
+  // Where the parent it goes before is not needed, the next one that is takes its place.
+  const place = split.before === null ? 0 : needed.findIndex((index) => index >= split.before!);
   const own = needed.indexOf(split.parent);
   if (own < 0 || place < 0 || place >= own) return needed.map(whole);
   const rest = needed.map((parent) => (parent === split.parent ? { parent, share: 1 - split.share } : whole(parent)));

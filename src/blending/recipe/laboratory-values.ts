@@ -10,6 +10,8 @@ import { FieldReader } from './reader.ts';
 const LEAST = 1e-9;
 const MOST = 1e9;
 /** Tables of contents in percent, of which there is no more than all. */
+/** Temperatures in °C, which may lie below zero. */
+const SIGNED: ReadonlySet<string> = new Set(['liquefied-above']);
 const PERCENT = /^(?:lfl|ufl|tci|loc):/;
 
 /**
@@ -26,12 +28,12 @@ export function readLaboratoryValues(reader: FieldReader, values: readonly Labor
     if (source.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.source` });
     if (date.trim() === '') reader.problems.push({ code: 'origin-missing', field: `${field}.date` });
     else if (!isDay(date.trim())) reader.problems.push({ code: 'not-a-day', field: `${field}.date` });
-    own.set(id, { value: readNumber(reader, `${field}.value`, value, PERCENT.test(id) ? 100 : MOST), source: source.trim(), date: date.trim() });
+    own.set(id, { value: readNumber(reader, `${field}.value`, value, PERCENT.test(id) ? 100 : MOST, SIGNED.has(id)), source: source.trim(), date: date.trim() });
   }
   return own;
 }
 
-function readNumber(reader: FieldReader, field: string, text: string, most: number): number {
+function readNumber(reader: FieldReader, field: string, text: string, most: number, signed: boolean): number {
   const number = parseNumberText(text);
   if (!number.ok) {
     reader.problems.push({ code: 'entry', field, problem: number.reason });
@@ -39,8 +41,8 @@ function readNumber(reader: FieldReader, field: string, text: string, most: numb
   }
   const { value, rest } = number.value;
   if (rest !== '') reader.problems.push({ code: 'number-alone', field, text });
-  else if (!(value > 0)) reader.problems.push({ code: 'not-positive', field });
-  else if (value < LEAST || value > most) reader.problems.push({ code: 'value-beyond', field, lowest: LEAST, highest: most });
+  else if (!(value > 0) && !signed) reader.problems.push({ code: 'not-positive', field });
+  else if (Math.abs(value) < LEAST || value > most) reader.problems.push({ code: 'value-beyond', field, lowest: LEAST, highest: most });
   return value;
 }
 

@@ -7,11 +7,11 @@
  * The criteria in their order: an earlier one outweighs all later ones together.
  *
  * - `holds`: findings that hold the plan because of the gas or the pressure, by the rules
- *   fuel-with-oxidiser, fuel-meets-oxidiser, stop-above-working-pressure, condensation-at-step
- *   and supply-pressure;
+ *   fuel-with-oxidiser, fuel-meets-oxidiser, stop-above-working-pressure, condensation-at-step,
+ *   supply-pressure and, of the first cylinder, batch-supply;
  * - `unmeasured`: additions that the rule gauge-too-coarse holds. They hold the plan as well, but
  *   come after: an order must not be made more dangerous to be read more finely;
- * - `cautions`: cautions of the five rules above. Those of the gauge rules are not counted: a coarse
+ * - `cautions`: cautions of the rules above. Those of the gauge rules are not counted: a coarse
  *   gauge counts in `gauge`, shutting one off in `time`;
  * - `phase`: states that are not, or could not be shown to be, one gas;
  * - `supply`: parents that stand below their stop once this fill has been drawn from them (2), or above

@@ -20,8 +20,8 @@ export type RouteFault =
   | { readonly code: 'unmeasured'; readonly verdict: 'hold'; readonly relative: number; readonly limit: number }
   /** Not, or not shown to be, one gas. */
   | { readonly code: 'not-gas'; readonly verdict: 'none'; readonly phase: 'unstable' | 'not tested' }
-  /** What is left in the parent after this draw does not reach its stop (2) or leaves less than the margin (1). */
-  | { readonly code: 'falls'; readonly verdict: 'none'; readonly grade: 1 | 2; readonly left: Pascal };
+  /** What is left in the parent after this draw does not reach its stop (2, a hold unless the supply is held already) or leaves less than the margin (1). */
+  | { readonly code: 'falls'; readonly verdict: 'none' | 'hold'; readonly grade: 1 | 2; readonly left: Pascal };
 
 /** One addition of an order, judged. */
 export interface RouteStep {

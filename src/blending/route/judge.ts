@@ -1,4 +1,5 @@
 import { pascal } from '../../units/index.ts';
+import type { Pascal } from '../../units/index.ts';
 import { classifyTogether } from '../hazards/fuel-and-oxidiser.ts';
 import type { TogetherClass } from '../hazards/fuel-and-oxidiser.ts';
 import { judgeGauge } from '../hazards/gauge-judgement.ts';
@@ -8,6 +9,7 @@ import { judgeSupply, marginOf } from '../hazards/supply-judgement.ts';
 import type { SupplyJudgement } from '../hazards/supply-judgement.ts';
 import { judgeBoundary } from '../hazards/together-judgement.ts';
 import type { BoundaryJudgement } from '../hazards/together-judgement.ts';
+import { neededPressure } from '../supply/index.ts';
 import { CAUTIONS, GAS, GAUGE, HOLDS, PHASE, SUPPLY, TIME, UNMEASURED, gasUnits, gaugeUnits, timeUnits } from './criteria.ts';
 import { additionMinutes, lineLoss } from './effort.ts';
 import type { RouteParent } from './parents.ts';
@@ -46,7 +48,7 @@ export function judgeAddition(
   const { parent, isLast } = part;
   const inside = before ?? start;
   const rise = after.pressure - (inside?.pressure ?? 0);
-  const supply = isLast ? judgeSupply(parent.parent, parent.condensable, after.pressure, job.values) : null;
+  const supply = isLast ? judgeSupply(parent.parent, parent.condensable, after.pressure, job.batch.boosterInlet, job.values) : null;
   const gauge = job.by === 'mass' || after.gauge === null ? null
     : judgeGauge(job, after.gauge, { parent: parent.parent.key, stop: after.pressure, rise, mass: part.share * parent.mass });
   return {
@@ -69,9 +71,9 @@ function judgeMeeting(
 }
 
 /** Whether what is left in a parent after the fill still reaches its stop; a booster draws it down further. */
-function fallsShort({ left }: RouteParent, stop: number, { batch, values }: RouteProblem['job']): 0 | 1 | 2 {
+function fallsShort({ left, condensable }: RouteParent, stop: Pascal, { batch, values }: RouteProblem['job']): 0 | 1 | 2 {
   if (left === null) return 0;
-  const needed = batch.boosterInlet === null ? stop : Math.min(stop, batch.boosterInlet);
+  const needed = neededPressure(condensable, stop, batch.boosterInlet);
   if (left < needed) return 2;
   return left < needed + marginOf(needed, values) ? 1 : 0;
 }
@@ -94,6 +96,8 @@ export function addCost(
   countVerdict(after.stop?.verdict, units, offset);
   countVerdict(supply?.verdict, units, offset);
   units[offset + SUPPLY]! += beyondRule(judged);
+  // Here `batch-supply` holds the plan, unless `supply-pressure` does already.
+  if (judged.falls === 2 && supply?.verdict !== 'hold') countVerdict('hold', units, offset);
   if (gauge?.verdict === 'hold') units[offset + UNMEASURED]! += 1;
   units[offset + GAUGE]! += gaugeUnits((relative ?? Infinity) / parent.tolerance);
   units[offset + TIME]! += timeUnits(additionMinutes(rise, gaugeChanges));

@@ -100,6 +100,6 @@ function faultsOf(
   if (gauge?.verdict === 'hold') faults.push({ code: 'unmeasured', verdict: 'hold', relative: gauge.relative, limit: gauge.limit });
   if (tested.phase === 'unstable' || tested.phase === 'not tested') faults.push({ code: 'not-gas', verdict: 'none', phase: tested.phase });
   const grade = judged.falls;
-  if (beyondRule(judged) > 0 && grade !== 0 && left !== null) faults.push({ code: 'falls', verdict: 'none', grade, left });
+  if (beyondRule(judged) > 0 && grade !== 0 && left !== null) faults.push({ code: 'falls', verdict: grade === 2 && supply?.verdict !== 'hold' ? 'hold' : 'none', grade, left });
   return faults.sort((a, b) => gravity[a.verdict] - gravity[b.verdict]);
 }

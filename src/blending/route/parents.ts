@@ -1,6 +1,5 @@
-import { kilogram } from '../../units/index.ts';
+import { kilogram, pascal } from '../../units/index.ts';
 import type { Kelvin, Kilogram, Pascal } from '../../units/index.ts';
-import type { ThermoModel } from '../../thermo/index.ts';
 import type { FuelOxidiserScale } from '../hazards/fuel-and-oxidiser.ts';
 import { limitWithoutTolerance, toleranceOfStep } from '../hazards/step-resolution.ts';
 import { meetingGas } from '../hazards/together-judgement.ts';
@@ -9,8 +8,10 @@ import { valueIn } from '../values/value.ts';
 import { condensableParent } from '../phase/liquefied.ts';
 import type { CondensableParent } from '../phase/liquefied.ts';
 import { massOf } from '../plan/fill-states.ts';
+import type { FillAmounts } from '../plan/amounts.ts';
 import type { Job, JobParent } from '../recipe/job.ts';
-import { pressureLeft } from './pressure-left.ts';
+import type { ConditionedStep } from '../steps/conditioning.ts';
+import { storeOf } from '../supply/index.ts';
 
 /** How the stop after a parent is read: at which gas temperature, on which gauge if one is asked for. */
 export interface Reading {
@@ -29,7 +30,7 @@ export interface RouteParent {
   /** null: a gas is in no table. */
   readonly meeting: MeetingGas | null;
   readonly condensable: CondensableParent | null;
-  /** Left in its cylinder after this fill, absolute; null: not known. */
+  /** Left in its cylinder after this fill and its purges, absolute; 0: it does not hold so much; null: not known. */
   readonly left: Pascal | null;
   /** Relative tolerance that the addition has to serve; the limit of the gauge rule where none is stated. */
   readonly tolerance: number;
@@ -43,7 +44,7 @@ export interface RouteParent {
  * of addition that cost the same the one nearer to it is taken.
  */
 export function routeParents(
-  job: Job, model: ThermoModel, scale: FuelOxidiserScale | null, additions: readonly number[], molarMasses: Float64Array,
+  job: Job, scale: FuelOxidiserScale | null, { additions, conditioned }: Pick<FillAmounts, 'additions' | 'conditioned'>, molarMasses: Float64Array,
 ): { readonly parents: readonly RouteParent[]; readonly readings: readonly Reading[] } {
   const readings: Reading[] = [];
   const readingOf = ({ gasTemperature: temperature, gauge: asked }: JobParent): number => {
@@ -61,11 +62,29 @@ export function routeParents(
       mass: kilogram(amount * massOf(parent.fractions, molarMasses)),
       meeting: scale === null ? null : meetingGas(job.gases, scale, parent.fractions),
       condensable: condensableParent(job, parent),
-      left: pressureLeft(job, model, parent, drawers * amount),
+      left: pressureLeft(job, parent, drawers * (amount + purgeGasOf(job, conditioned, index))),
       tolerance: toleranceOfStep({ job }, { parent: parent.key }) ?? valueIn(job.values, limitWithoutTolerance),
       reading: readingOf(parent),
     }));
   return { parents, readings };
+}
+
+/** mol of a parent, by its index, that went into purges. */
+export function purgeGasOf({ conditioning }: Job, conditioned: readonly ConditionedStep[], index: number): number {
+  return conditioned.reduce((sum, { step, purgeGas }) => {
+    const act = conditioning[step];
+    return act?.kind === 'purge' && act.parent === index ? sum + purgeGas : sum;
+  }, 0);
+}
+
+/** By the same store as the supply of the finished plan. */
+function pressureLeft(job: Job, parent: JobParent, drawn: number): Pascal | null {
+  const store = storeOf(job, parent);
+  if (!store.ok) return null;
+  const left = store.value.held - drawn;
+  if (left < 0) return pascal(0);
+  const pressure = store.value.pressureAt(left);
+  return pressure.ok ? pressure.value : null;
 }
 
 /** Amounts that differ by less came out of the same arithmetic in another order. */

@@ -6,16 +6,18 @@ import { classifyTogether, fuelOxidiserScale, limitingOxygen, pointOf } from '..
 import type { FuelOxidiserPoint, FuelOxidiserScale, LimitingOxygen } from '../hazards/fuel-and-oxidiser.ts';
 import { judgeParentMixture, meetingGas } from '../hazards/together-judgement.ts';
 import type { MeetingGas } from '../hazards/together-judgement.ts';
+import { unstatedParent } from '../hazards/rules/fuel-with-oxidiser.ts';
 import { worstCase } from '../hazards/worst-case.ts';
 import { phaseOfState } from '../phase/plan-phase.ts';
 import type { FillAmounts } from '../plan/amounts.ts';
 import type { CylinderState } from '../plan/plan.ts';
 import type { Job } from '../recipe/job.ts';
+import { valueIn } from '../values/value.ts';
 import { settle, totalAmount } from '../steps/cylinder.ts';
 import type { Vessel } from '../steps/cylinder.ts';
 import type { OrderProblem } from './data.ts';
 import { gasScreen, isSurelyGas } from './gas-screen.ts';
-import { routeParents } from './parents.ts';
+import { purgeGasOf, routeParents } from './parents.ts';
 import type { RouteParent } from './parents.ts';
 import { StateBook } from './states.ts';
 
@@ -48,7 +50,7 @@ export function routeProblem(
   const judged = fuelOxidiserScale(job.gases, job.values);
   const scale = judged.ok ? judged.value : null;
   const molarMasses = Float64Array.from(job.gases, (gas) => gasRecord(gas).molarMass.value);
-  const { parents, readings } = routeParents(job, model, scale, amounts.additions, molarMasses);
+  const { parents, readings } = routeParents(job, scale, amounts, molarMasses);
   if (parents.length === 0) return fail({ code: 'nothing-to-add' });
   const start = totalAmount(amounts.residual) > 0 ? settle(model, vessel, amounts.residual, job.cylinder.contents.temperature) : null;
   if (start !== null && !start.ok) return fail({ code: 'no-state', where: 'residual', reason: start.reason });
@@ -61,7 +63,7 @@ export function routeProblem(
     readings: readings.length,
     book: new StateBook(job, model, vessel, scale, amounts.residual, parents, readings),
     start: before === null ? null : { pressure: before.pressure, meeting: scale === null ? null : meetingGas(job.gases, scale, before.fractions) },
-    base: baseFindings(job, model, scale, parents, before),
+    base: baseFindings(job, model, scale, amounts, before),
   });
 }
 
@@ -77,7 +79,7 @@ function finishedOf(job: Job, model: ThermoModel, scale: FuelOxidiserScale | nul
 
 /** What the rules say of the parents and of what was left, whatever the order. */
 function baseFindings(
-  job: Job, model: ThermoModel, scale: FuelOxidiserScale | null, parents: readonly RouteParent[], start: CylinderState | null,
+  job: Job, model: ThermoModel, scale: FuelOxidiserScale | null, amounts: FillAmounts, start: CylinderState | null,
 ): RouteProblem['base'] {
   const verdicts: string[] = [];
   if (start !== null && phaseOfState(model, start).phase === 'unstable') verdicts.push('hold');
@@ -87,8 +89,10 @@ function baseFindings(
       const judged = classifyTogether(pointOf(scale, start.fractions), limitingOxygen(scale, [start.fractions]), start.pressure, job.values);
       verdicts.push(judged === 'lean' ? 'caution' : judged);
     }
-    for (const { parent, meeting } of parents) {
-      verdicts.push((meeting === null ? null : judgeParentMixture(meeting, parent.pressure ?? pascal(200e5), job.values)) ?? 'none');
+    const unstated = pascal(valueIn(job.values, unstatedParent) * 1e5);
+    const opened = job.parents.filter((_, i) => amounts.additions[i]! > 0 || purgeGasOf(job, amounts.conditioned, i) > 0);
+    for (const { fractions, pressure } of opened) {
+      verdicts.push(judgeParentMixture(meetingGas(job.gases, scale, fractions), pressure ?? unstated, job.values) ?? 'none');
     }
   }
   const count = (verdict: string): number => verdicts.filter((each) => each === verdict).length;

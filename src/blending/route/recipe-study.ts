@@ -25,7 +25,7 @@ export function studyRecipe(recipe: Recipe): Calculations['study']['answer'] {
   const study = studyOrders(job, model.value, vessel, amounts.value);
   if (!study.ok) return study;
   const { sequence } = recipe.route;
-  if (sequence === 'best') return ok({ study: study.value, own: study.value.chosen });
+  if (sequence === 'best') return ok({ job, study: study.value, own: study.value.chosen });
   const own = costOfOrder(job, model.value, vessel, amounts.value, sequenceOfAdditions(job, amounts.value.additions, sequence));
-  return own.ok ? ok({ study: study.value, own: own.value }) : own;
+  return own.ok ? ok({ job, study: study.value, own: own.value }) : own;
 }

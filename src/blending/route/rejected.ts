@@ -64,6 +64,6 @@ function firstFault({ steps }: JudgedOrder, criterion: Criterion): RejectedOrder
 export function criterionOf({ code, verdict }: RouteFault): Criterion {
   if (code === 'unmeasured') return 'unmeasured';
   if (code === 'not-gas') return 'phase';
-  if (code === 'falls') return 'supply';
+  if (code === 'falls' && verdict === 'none') return 'supply';
   return verdict === 'hold' ? 'holds' : 'cautions';
 }

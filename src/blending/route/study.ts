@@ -66,7 +66,7 @@ export function studyOrders(
 
 /**
  * What one order costs, a technician's own for example; fails with `arrangement-invalid` where it does not bring every
- * parent needed once as a whole, or with `no-state`. Any number of parents.
+ * parent needed once as a whole, or with `no-state`.
  */
 export function costOfOrder(
   job: Job, model: ThermoModel, vessel: Vessel, amounts: FillAmounts, arrangement: Arrangement,

@@ -38,6 +38,15 @@ export function cylinderFromStock(entry: StockCylinder): Cylinder {
   };
 }
 
+/**
+ * A recipe's copy of a cylinder as it would be copied today. What a list does not
+ * know stays as it is in the recipe: the contents, the reading on the balance, own expansions.
+ */
+export function refreshedCylinder(entry: StockCylinder, copy: Cylinder): Cylinder {
+  const { contents, startReading, pressureExpansion, thermalExpansion } = copy;
+  return { ...cylinderFromStock(entry), contents, startReading, pressureExpansion, thermalExpansion };
+}
+
 function isServiceStricter({ workingPressure, servicePressure }: StockCylinder): boolean {
   if (servicePressure.typed.trim() === '') return false;
   if (workingPressure.typed.trim() === '') return true;

@@ -1,7 +1,7 @@
 /** What the stock screens compute with, fetched together when somebody first needs them. */
 export * from './file/file.ts';
 export { demoStock } from './demo.ts';
-export { balanceWords, cylinderFromStock, gaugeFromStock, parentFromStock, shareText, thermometerWords } from './copy.ts';
+export { balanceWords, cylinderFromStock, gaugeFromStock, parentFromStock, refreshedCylinder, shareText, thermometerWords } from './copy.ts';
 export type { Delimiter } from './csv/cells.ts';
 export { readParentsPaste, readPurityPaste } from './csv/paste.ts';
 export type { CellFault, TableProblem } from './csv/problem.ts';

@@ -35,6 +35,9 @@ const BELOW_SATURATION = 1 - 1e-6;
  * vapour pressure until the last liquid is gone.
  */
 export function storeOf({ gases }: Pick<Job, 'gases'>, parent: JobParent): Outcome<ParentStore, StoreGap> {
+  // What is not stated needs no model.
+  if (parent.filling === 'gas' && parent.waterCapacity === null) return fail({ code: 'water-capacity-not-stated' });
+  if (parent.filling === 'gas' && parent.pressure === null) return fail({ code: 'pressure-not-stated' });
   const present = gases.map((_, i) => i).filter((i) => parent.fractions[i]! > 0);
   const model = realModel(present.map((i) => gases[i]!));
   if (!model.ok) return fail({ code: 'state', reason: model.reason });

@@ -1,7 +1,10 @@
-import { fail, mole, ok } from '../../units/index.ts';
+import { fail, mole, ok, pascal } from '../../units/index.ts';
 import type { Mole, Outcome, Pascal } from '../../units/index.ts';
 import type { UncheckedPlan } from '../plan/plan.ts';
 import type { JobParent } from '../recipe/job.ts';
+import { condensableParent } from '../phase/liquefied.ts';
+import type { CondensableParent } from '../phase/liquefied.ts';
+import { neededPressure } from './needed-pressure.ts';
 import { storeOf } from './store.ts';
 import type { ParentStore, StoreGap } from './store.ts';
 
@@ -26,6 +29,8 @@ export interface ParentSupply {
   readonly parent: string;
   /** mol for one cylinder, purges included. */
   readonly drawn: Mole;
+  /** The highest pressure that it fills to, absolute, purges included. */
+  readonly highest: Pascal;
   readonly supply: Outcome<KnownSupply, StoreGap>;
 }
 
@@ -70,16 +75,20 @@ const WHOLE = 1e-9;
  * Pressure and amount left in each parent after this plan and after the batch.
  * A parent gives as long as its own pressure, after the draw, is not below the
  * stop it fills to, which depends on its place in the order; a booster draws it
- * down to the booster's inlet pressure. Real gas throughout, parents at their own
+ * down to the booster's inlet pressure, as `neededPressure` says. Real gas throughout, parents at their own
  * temperature. Amounts are conserved: held = left + drawn.
  */
 export function supplyOf(plan: UncheckedPlan): Supply {
   const { batch } = plan.job;
-  const parents = openedParents(plan).map((parent): ParentSupply => {
+  const parents = openedParents(plan).flatMap((parent): readonly ParentSupply[] => {
     const draws = drawsOf(plan, parent);
+    const last = draws.at(-1);
+    // A purge of no cycle takes nothing.
+    if (last === undefined) return [];
     const store = storeOf(plan.job, parent);
-    const supply = store.ok ? knownSupply(store.value, draws, batch) : store;
-    return { parent: parent.key, drawn: mole(draws.at(-1)?.upTo ?? 0), supply };
+    const condensable = condensableParent(plan.job, parent);
+    const supply = store.ok ? knownSupply(store.value, draws, last.upTo, condensable, batch) : store;
+    return [{ parent: parent.key, drawn: mole(last.upTo), highest: pascal(Math.max(...draws.map(({ stop }) => stop))), supply }];
   });
   const known = parents.flatMap(({ parent, supply }) => (supply.ok ? [{ parent, ...supply.value }] : []));
   const lasts = known.length === 0 ? null : Math.min(...known.map(({ cylinders }) => cylinders));
@@ -113,12 +122,13 @@ function drawsOf({ job, conditioned, steps }: UncheckedPlan, parent: JobParent):
 }
 
 function knownSupply(
-  store: ParentStore, draws: readonly Draw[], { cylinders: asked, together, boosterInlet }: UncheckedPlan['job']['batch'],
+  store: ParentStore, draws: readonly Draw[], drawn: number, condensable: CondensableParent | null,
+  { cylinders: asked, together, boosterInlet }: UncheckedPlan['job']['batch'],
 ): Outcome<KnownSupply, StoreGap> {
-  const drawn = draws.at(-1)!.upTo;
-  const plain = lastingFor(store, draws, drawn, together, null);
+  const plain = lastingFor(store, draws, drawn, together, (stop) => stop);
   if (!plain.ok) return plain;
-  const boosted = boosterInlet === null ? null : lastingFor(store, draws, drawn, together, boosterInlet);
+  const boosted = boosterInlet === null ? null
+    : lastingFor(store, draws, drawn, together, (stop) => neededPressure(condensable, stop, boosterInlet));
   if (boosted?.ok === false) return boosted;
   const pressure = store.pressureAt(store.held);
   if (!pressure.ok) return fail({ code: 'state', reason: pressure.reason });
@@ -136,12 +146,11 @@ function knownSupply(
 
 /** Whole cylinders until the parent has fallen to what it must stand above, and the draw at which that is. */
 function lastingFor(
-  store: ParentStore, draws: readonly Draw[], drawn: number, together: boolean, inlet: Pascal | null,
+  store: ParentStore, draws: readonly Draw[], drawn: number, together: boolean, neededFor: (stop: Pascal) => Pascal,
 ): Outcome<{ readonly cylinders: number; readonly draw: Draw }, StoreGap> {
   let fewest: { readonly cylinders: number; readonly draw: Draw } | null = null;
   for (const draw of draws) {
-    const limit = inlet !== null && inlet < draw.stop ? inlet : draw.stop;
-    const left = store.leftAt(limit);
+    const left = store.leftAt(neededFor(draw.stop));
     if (!left.ok) return fail({ code: 'state', reason: left.reason });
     const usable = store.held - left.value;
     // One after another, the last cylinder draws after all others have had their whole share.

@@ -1,5 +1,4 @@
 import type { LaboratoryValue, Stock } from '../../blending/index.ts';
-import { freshKey } from '../command.ts';
 import type { StockCommand } from './contract.ts';
 
 /** The lists of things in the stock that have a key. */
@@ -11,18 +10,13 @@ export type StockItem<List extends StockList> = Stock[List][number];
 const words: Readonly<Record<StockList, string>> = {
   parents: 'parent', cylinders: 'cylinder', gauges: 'gauge', thermometers: 'thermometer', balances: 'balance',
 };
-const letters: Readonly<Record<StockList, string>> = { parents: 's', cylinders: 'c', gauges: 'g', thermometers: 't', balances: 'b' };
 
-/** Adds things at the end of a list, each under a fresh key. */
-export function addStock<List extends StockList>(list: List, items: readonly Omit<StockItem<List>, 'key'>[]): StockCommand {
+/** Adds things at the end of a list under the keys they bring; see `StockActions.newKey`. A key in use is refused. */
+export function addStock<List extends StockList>(list: List, items: readonly StockItem<List>[]): StockCommand {
   return {
     label: () => (items.length === 1 ? `added ${words[list]}` : `added ${String(items.length)} ${list}`),
     merge: null,
-    apply: (stock) => {
-      const all: { readonly key: string }[] = [...stock[list]];
-      for (const item of items) all.push({ ...item, key: freshKey(all, letters[list]) });
-      return { ...stock, [list]: all };
-    },
+    apply: (stock) => ({ ...stock, [list]: [...stock[list], ...items] }),
   };
 }
 

@@ -19,11 +19,21 @@ export type StockNotice =
    * What was stored could not be read. It is kept under the key `keptAs`; shown is the starter, or what was on the
    * screen already when another window wrote it.
    */
-  | { readonly kind: 'unreadable'; readonly problem: SealProblem | StockFileProblem; readonly keptAs: string; readonly shown: 'starter' | 'ours' };
+  | {
+      readonly kind: 'unreadable';
+      readonly problem: SealProblem | StockFileProblem;
+      readonly keptAs: string;
+      readonly shown: 'starter' | 'ours';
+      /** What was stored, to the letter. */
+      readonly text: string;
+    };
+
+/** `withheld`: a newer program's stock lies in storage, and nothing is written over it. */
+export type StockSaveState = SaveState | { readonly kind: 'withheld' };
 
 export interface StockState {
   readonly stock: Stock;
-  readonly save: SaveState;
+  readonly save: StockSaveState;
   readonly undoLabel: string | null;
   readonly redoLabel: string | null;
   readonly notice: StockNotice | null;
@@ -34,6 +44,8 @@ export interface StockActions {
   run(command: StockCommand): boolean;
   undo(): string | null;
   redo(): string | null;
+  /** A key for a new entry, which no entry has or ever had: recipes remember the keys of what they copied. */
+  newKey(): string;
   /** The whole stock as a file. */
   exportFile(): ExportedFile;
   /** Puts the stock of a file in place of this one, as one undo step. */

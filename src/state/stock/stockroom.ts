@@ -3,6 +3,7 @@ import { loadStockTools, type Stock, type StockFileProblem, type StockTools } fr
 import { ok, type Outcome } from '../../units/index.ts';
 import type { SaveProblem } from '../contract.ts';
 import { perform, redo, redoLabel, startHistory, undo, undoLabel, type History } from '../history.ts';
+import type { SealProblem } from '../persist/seal.ts';
 import type { StorageProblem } from '../persist/storage.ts';
 import type { StockCommand, StockNotice, Stockroom, StockroomDependencies, StockState } from './contract.ts';
 import { decodeStored, encodeStored, stockKey } from './stored.ts';
@@ -13,7 +14,8 @@ const saveDelay = 300;
 /**
  * Opens the laboratory's stock: what storage holds, or the starter at the very
  * first start. A stored text that cannot be read is never overwritten: it is
- * moved to a key of its own and told.
+ * moved to a key of its own and told. That of a newer program stays where it is,
+ * and nothing is saved while it lies there.
  */
 export async function openStockroom(deps: StockroomDependencies): Promise<Stockroom> {
   const tools = await loadStockTools();
@@ -29,6 +31,10 @@ class Room implements Stockroom {
   /** The stored text as this window last wrote or read it; null: nothing was there. */
   private base: string | null = null;
   private cancelSave: (() => void) | null = null;
+  /** A newer program's text that was told already. */
+  private withheld: string | null = null;
+  /** Of the last key given out, ms. */
+  private lastKey = 0;
   private readonly stopHearing: () => void;
 
   constructor(deps: StockroomDependencies, tools: StockTools) {
@@ -44,6 +50,7 @@ class Room implements Stockroom {
       run: (command: StockCommand) => this.run(command),
       undo: () => this.step(undoLabel(this.history), undo),
       redo: () => this.step(redoLabel(this.history), redo),
+      newKey: () => this.newKey(),
       exportFile: () => ({ fileName: 'stock.json', text: tools.encodeStock(this.history.present, deps.program) }),
       importFile: (text: string) => this.importFile(text),
       dismissNotice: () => { this.tell(null); },
@@ -66,7 +73,11 @@ class Room implements Stockroom {
       this.base = text.value;
       return { stock: stock.value, save: { kind: 'saved', at: clock() }, notice: null };
     }
-    const unreadable = { kind: 'unreadable', problem: stock.reason, shown: 'starter' } as const;
+    const unreadable = { kind: 'unreadable', problem: stock.reason, shown: 'starter', text: text.value } as const;
+    if (isNewer(stock.reason)) {
+      this.withheld = text.value;
+      return { stock: starter, save: { kind: 'withheld' }, notice: { ...unreadable, keptAs: stockKey } };
+    }
     const kept = this.putAside(text.value);
     if (!kept.ok) return { stock: starter, save: { kind: 'failed', problem: kept.reason }, notice: { ...unreadable, keptAs: stockKey } };
     return { stock: starter, save: { kind: 'pending' }, notice: { ...unreadable, keptAs: kept.value } };
@@ -79,6 +90,12 @@ class Room implements Stockroom {
     if (!kept.ok) return kept;
     this.base = text;
     return ok(keptAs);
+  }
+
+  /** A millisecond serves once, and none comes again. */
+  private newKey(): string {
+    this.lastKey = Math.max(this.lastKey + 1, this.deps.clock());
+    return `e-${this.lastKey.toString(36)}`;
   }
 
   private run(command: StockCommand): boolean {
@@ -100,6 +117,10 @@ class Room implements Stockroom {
 
   private change(history: History<Stock>): void {
     this.show(history);
+    this.saveSoon();
+  }
+
+  private saveSoon(): void {
     this.store.setState({ save: { kind: 'pending' } });
     this.cancelSave?.();
     this.cancelSave = this.deps.schedule(saveDelay, () => { this.save(); });
@@ -133,6 +154,8 @@ class Room implements Stockroom {
     const found = storage.read(stockKey);
     if (!found.ok) return this.failed(found.reason);
     if (found.value !== null && found.value !== this.base) {
+      const theirs = decodeStored(this.tools, found.value);
+      if (!theirs.ok && isNewer(theirs.reason)) return this.withhold(theirs.reason, found.value);
       const kept = this.takeUnderOurs(found.value);
       if (!kept.ok) return this.failed(kept.reason);
     }
@@ -147,6 +170,16 @@ class Room implements Stockroom {
     return true;
   }
 
+  /** Leaves a newer program's stock as it is, and tells it once. */
+  private withhold(problem: SealProblem | StockFileProblem, text: string): false {
+    if (this.withheld !== text) {
+      this.tell({ kind: 'unreadable', problem, keptAs: stockKey, shown: 'ours', text });
+    }
+    this.withheld = text;
+    this.store.setState({ save: { kind: 'withheld' } });
+    return false;
+  }
+
   /**
    * Another window's version becomes the step before ours, so that undo brings
    * it back; one that cannot be read is put aside. Fails when it could not be.
@@ -156,7 +189,7 @@ class Room implements Stockroom {
     if (!theirs.ok) {
       const kept = this.putAside(text);
       if (!kept.ok) return kept;
-      this.tell({ kind: 'unreadable', problem: theirs.reason, keptAs: kept.value, shown: 'ours' });
+      this.tell({ kind: 'unreadable', problem: theirs.reason, keptAs: kept.value, shown: 'ours', text });
       return ok(null);
     }
     const ours = this.history.present;
@@ -170,16 +203,20 @@ class Room implements Stockroom {
 
   private hear(): void {
     const found = this.deps.storage.read(stockKey);
-    if (!found.ok || found.value === this.base || found.value === null) return;
+    if (!found.ok || found.value === this.base) return;
     const { kind } = this.store.getState().save;
     // The save that is on its way notices by itself; two windows that answered each other at once would never come to rest.
     if (kind === 'pending') return;
-    if (kind === 'failed') {
+    if (kind !== 'saved') {
       this.save();
       return;
     }
-    const theirs = decodeStored(this.tools, found.value);
-    if (!theirs.ok) return;
+    const theirs = found.value === null ? null : decodeStored(this.tools, found.value);
+    // Emptied, or a text that cannot be read: ours is saved again, and that tells what was there.
+    if (theirs?.ok !== true) {
+      this.saveSoon();
+      return;
+    }
     this.base = found.value;
     const before = this.history;
     const command: StockCommand = { label: () => 'change in another window', merge: null, apply: () => theirs.value };
@@ -195,4 +232,8 @@ class Room implements Stockroom {
   private tell(notice: StockNotice | null): void {
     this.store.setState({ notice });
   }
+}
+
+function isNewer({ code }: SealProblem | StockFileProblem): boolean {
+  return code === 'entry-newer-version' || code === 'newer-version';
 }

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { demoStock } from '../../../src/blending/stock/tools.ts';
 import {
   benchSentence, cellFaultSentence, impossibleSentences, lastingSentence, leftOutSentence, setAsideSentence, shortageSentence, stockFileSentence,
-  supplyGapSentence, tableSentence, traceSentence, unorderedSentence,
+  supplyGapSentence, tableSentence, traceSentence, undecidedSentence, unorderedSentence,
 } from '../../../src/blending/messages/stock.ts';
 import type { BenchProblem, LeftOutReason } from '../../../src/blending/stock/choose/bench.ts';
 import type { Shortage } from '../../../src/blending/stock/choose/impossible.ts';
@@ -86,13 +86,14 @@ describe('sentences about the stock', () => {
     Object.values(faults).map((fault) => cellFaultSentence(fault, 'wood')).forEach(expectSentence);
     Object.values(leftOut).map((reason) => leftOutSentence({ parent: 'a', name: 'Argon', reason })).forEach(expectSentence);
     Object.values(benchProblems).map(benchSentence).forEach(expectSentence);
+    expectSentence(undecidedSentence);
     expectSentence(benchSentence({ code: 'nothing-to-choose-from', leftOut: [] }));
     Object.values(shortages).map((shortage) => shortageSentence(shortage, nameOf)).forEach(expectSentence);
     Object.values(gaps).map((gap) => supplyGapSentence(gap, 'Argon')).forEach(expectSentence);
   });
 
   it('say in one go what is missing, what comes nearest and what would help', () => {
-    const impossible = { code: 'impossible', nearest, setAside: [], considered: [], total: mole(60) } as const;
+    const impossible = { code: 'impossible', nearest, setAside: [], considered: [], total: mole(60), barometer } as const;
     const pure = impossibleSentences({ ...impossible, shortage: shortages['component-missing'], remedies: [{ gas: 'carbon monoxide', vapourPressure: null }] }, nameOf);
     expect(pure).toEqual([
       'No parent of the stock holds CO.', 'The nearest that can be made is 95.0 % N₂, 5.00 % O₂.', 'One more parent of pure CO would make it possible.',

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { curvePoint, mixingCurve } from '../../../src/blending/index.ts';
+import { curvePoint, mixingCurve } from '../../../src/blending/curves/index.ts';
 import { realModel } from '../../../src/thermo/index.ts';
 import { kelvin, pascal } from '../../../src/units/index.ts';
 import { valueOf } from '../lab.ts';

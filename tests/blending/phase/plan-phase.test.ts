@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { condensationCurve, lowestGasTemperature, recipeSentence } from '../../../src/blending/index.ts';
+import { recipeSentence } from '../../../src/blending/index.ts';
+import { condensationCurve, lowestGasTemperature } from '../../../src/blending/curves/index.ts';
 import type { Plan } from '../../../src/blending/index.ts';
 import { realModel, testStability } from '../../../src/thermo/index.ts';
 import { celsius, kelvin } from '../../../src/units/index.ts';

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { mixingCurveOf, pressureAlongFill, pressureOverTemperature } from '../../../src/blending/index.ts';
+import { mixingCurveOf, pressureAlongFill, pressureOverTemperature } from '../../../src/blending/curves/index.ts';
 import { kelvin, pascal } from '../../../src/units/index.ts';
 import { idealStops, planned, residual, stops } from '../lab.ts';
 

@@ -49,6 +49,9 @@ describe('sequenceOfAdditions', () => {
     ]);
     expect(sequenceOfAdditions({ ...job, split: { parent: 2, share: 0.25, before: null } }, [6, 0.3, 52, 3], 'as listed')[0])
       .toEqual({ parent: 2, share: 0.25 });
+    // Where the parent it goes before is not needed, the next one that is takes its place.
+    expect(sequenceOfAdditions({ ...job, split: { parent: 3, share: 0.25, before: 1 } }, [6, 0, 52, 3], 'as listed').map(({ parent }) => parent))
+      .toEqual([0, 3, 2, 3]);
     // The early part before itself or after the rest is no split.
     expect(order({ ...job, split: { parent: 2, share: 0.25, before: 2 } }, [6, 0.3, 52, 3], 'as listed')).toEqual([0, 1, 2, 3]);
     expect(order({ ...job, split: { parent: 2, share: 0.25, before: 3 } }, [6, 0.3, 52, 3], 'as listed')).toEqual([0, 1, 2, 3]);

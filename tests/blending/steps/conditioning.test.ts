@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { ConditioningStep, Cylinder } from '../../../src/blending/index.ts';
 import { planRecipe } from '../../../src/blending/index.ts';
-import { fractionOf, recipeOf, residual } from '../lab.ts';
+import { fractionOf, recipeOf, residual, valueOf } from '../lab.ts';
 import type { Fill } from '../lab.ts';
 
 const air: Cylinder['contents'] = residual('3 bar', [['O2', '21 %'], ['N2', '79 %']]);
@@ -61,6 +61,34 @@ describe('conditioning before the first addition', () => {
     expect(plan.start!.pressure / 1e5).toBeCloseTo(1.2, 9);
     expect(plan.start!.fractions[plan.job.gases.indexOf('oxygen')]).toBeCloseTo(0.21, 12);
     expect(plan.conditioned.map(({ step, oldGas }) => [step, oldGas])).toEqual([[0, 1], [1, 1]]);
+  });
+
+  it('an evacuated cylinder that is purged from 5 to 1.1 bar is filled from 1.1 bar of purge gas, none of it old', () => {
+    const recipe = recipeOf({ ...fill, contents: { state: 'evacuated' } });
+    const plan = valueOf(planRecipe({ ...recipe, conditioning: [{ kind: 'lower', to: absolute('1 mbar') }, purge({ cycles: '2' })] }));
+    expect(plan.start!.pressure / 1e5).toBeCloseTo(1.1, 9);
+    expect(plan.start!.fractions[plan.job.gases.indexOf('nitrogen')]).toBe(1);
+    expect(plan.conditioned).toMatchObject([{ step: 1, cycles: 2, oldGas: 0, byRule: null }]);
+    // From nothing to 5 bar, then once from 1.1 to 5 bar, in 10 L at 20 °C as an ideal gas: (5 + 3.9) bar × 10 L / (R T) = 3.65 mol.
+    expect(plan.conditioned[0]!.purgeGas).toBeCloseTo(3.65, 1);
+    // The nitrogen that is left counts in the fill: of the 95 % so much less is added.
+    const added = plan.steps.reduce((sum, { amount }) => sum + amount, 0);
+    expect(added + plan.start!.total).toBeCloseTo(plan.finished.total, 9);
+    expect(fractionOf(plan, 'carbon dioxide')).toBeCloseTo(0.05, 9);
+  });
+
+  it('nothing is left out of an evacuated cylinder', () => {
+    const recipe = recipeOf({ ...fill, contents: { state: 'evacuated' } });
+    const plan = valueOf(planRecipe({ ...recipe, conditioning: [{ kind: 'lower', to: absolute('1 bar') }, purge({ cycles: '', wanted: '1 %' })] }));
+    expect(plan).toMatchObject({ start: null, conditioned: [] });
+  });
+
+  it('counts the level that is not reached from all the old gas, as it is asked for', () => {
+    const hopeless = purge({ low: absolute('4.9 bar'), high: absolute('5 bar'), cycles: '', wanted: '0.1 %' });
+    const answer = answerOf(purge({ cycles: '1' }), hopeless);
+    const said = (answer.ok ? [] : answer.reason.problems).find(({ code }) => code === 'purge-never-ends');
+    // One cycle 5 → 1.1 bar leaves 0.22; then 1.1 of 5 bar once more, and 99 times 4.9 of 5 bar: 0.22 × 0.22 × 0.98^99 = 0.0065.
+    expect(said).toMatchObject({ cycles: 100, oldGas: expect.closeTo(0.0065, 3) as number });
   });
 
   it.each<[string, Act, string]>([

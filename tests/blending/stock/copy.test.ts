@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { emptyRecipe, planRecipe } from '../../../src/blending/index.ts';
-import { balanceWords, cylinderFromStock, demoStock, gaugeFromStock, parentFromStock, shareText, thermometerWords } from '../../../src/blending/stock/tools.ts';
+import { balanceWords, cylinderFromStock, demoStock, gaugeFromStock, parentFromStock, refreshedCylinder, shareText, thermometerWords } from '../../../src/blending/stock/tools.ts';
 
 const [first] = demoStock.cylinders;
 const gauge = (typed: string) => ({ typed, reference: 'gauge' }) as const;
@@ -53,5 +53,14 @@ describe('what a recipe copies of the stock', () => {
     ]);
     expect(balanceWords({ ...demoStock.balances[0]!, capacity: '', accuracy: '', calibrated: '' })).toBe('W1');
     expect([0.5, 0.1261, 0.0627, 0.0012].map(shareText)).toEqual(['50 %', '13 %', '6.3 %', '0.12 %']);
+  });
+});
+
+describe('a cylinder brought up to date', () => {
+  it('takes what the stock says now and keeps what no list knows', () => {
+    const entry = demoStock.cylinders[0]!;
+    const copy = { ...cylinderFromStock(entry), startReading: '12.01 kg', pressureExpansion: '1e-5' };
+    expect(refreshedCylinder(entry, copy)).toEqual(copy);
+    expect(refreshedCylinder({ ...entry, testDue: '2036-04-30' }, copy)).toEqual({ ...copy, testDue: '2036-04-30' });
   });
 });

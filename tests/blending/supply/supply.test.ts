@@ -114,6 +114,28 @@ describe('how far a parent lasts', () => {
     expect(none).toMatchObject({ lasts: null, lastsBoosted: null, shortest: [] });
   });
 
+  it('leaves out a parent that purges for no cycle, for one cylinder and for a batch', () => {
+    const recipe = recipeOf({ ...trace, parents: [...trace.parents!, pure('Ar', '200 bar')], contents: { state: 'residual', pressure: { typed: '1 bar', reference: 'absolute' }, temperature: '20 °C', composition: [{ gas: 'N2', amount: '100 %' }] } });
+    const absolute = (typed: string) => ({ typed, reference: 'absolute' }) as const;
+    const purge = (parent: string, cycles: string, wanted: string) => ({ kind: 'purge', parent, low: absolute('0.1 bar'), high: absolute('5 bar'), cycles, wanted }) as const;
+    for (const cylinders of ['1', '3']) {
+      const plan = valueOf(planRecipe({
+        ...recipe, conditioning: [purge('N2', '2', ''), purge('Ar', '', '1 %')], batch: { ...recipe.batch, cylinders },
+        parents: recipe.parents.map((parent) => ({ ...parent, waterCapacity: '50 L' })),
+      }));
+      expect(plan.conditioned[1]).toMatchObject({ step: 1, cycles: 0, purgeGas: 0 });
+      expect(supplyOf(plan).parents.map(({ parent }) => parent)).toEqual(['N2', 'CO2']);
+    }
+  });
+
+  it('lets no booster carry a gas past its vapour pressure', () => {
+    const late = { ...trace, parents: [pure('N2', '200 bar'), pure('CO2', '50 bar')] };
+    // Published (NIST): vapour pressure of CO2 at 20 °C 57.29 bar. Up to 150 bar it would condense on the way, up to 7.5 bar it does not.
+    expect(known(supplyOf(batchOf(late, sized, booster)), 'CO2').cylindersBoosted).toBe(0);
+    expect(known(supplyOf(batchOf(trace, sized, { ...booster, boosterInlet: { typed: '1 bar', reference: 'absolute' } })), 'CO2').cylindersBoosted)
+      .toBeGreaterThan(known(supplyOf(batchOf(trace, sized)), 'CO2').cylinders);
+  });
+
   it('counts the purge gas', () => {
     const recipe = recipeOf({ ...trace, contents: { state: 'residual', pressure: { typed: '1 bar', reference: 'absolute' }, temperature: '20 °C', composition: [{ gas: 'N2', amount: '100 %' }] } });
     const parents = recipe.parents.map((parent) => ({ ...parent, waterCapacity: '50 L' }));

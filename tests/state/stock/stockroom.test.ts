@@ -58,7 +58,7 @@ describe('an edit of the stock', () => {
 
   it('is undone and done again, saved each time', async () => {
     const { actions, store, time, texts } = await room();
-    actions.run(addStock('parents', [{ ...nitrogen, name: 'Second' }]));
+    actions.run(addStock('parents', [{ ...nitrogen, key: 'second', name: 'Second' }]));
     actions.run(editStock('parents', 'n2', { lot: 'L1' }));
     expect(store.getState()).toMatchObject({ undoLabel: 'changed parent', redoLabel: null });
     expect(actions.undo()).toBe('changed parent');
@@ -85,7 +85,6 @@ describe('an edit of the stock', () => {
 
 describe('a stored stock that cannot be read', () => {
   const damaged = textOf(starter).slice(0, -3);
-  const newer = '{"format":"fillwright-saved-stock","version":2}\n{}';
 
   it('is moved to a key of its own to the letter, told, and the starter is shown', async () => {
     const { store, texts, time } = await room({ texts: { [stockKey]: damaged } });
@@ -114,13 +113,13 @@ describe('a stored stock that cannot be read', () => {
 
   it('is put aside too when another window wrote it, and what is shown here goes on', async () => {
     const { actions, room: open, store, texts, time, memory } = await room();
-    memory.window().write(stockKey, newer);
+    memory.window().write(stockKey, damaged);
     expect(shown(open)).toBe(nitrogen.name);
     actions.run(renamed('typed'));
     time.pass(delay);
     const { notice } = store.getState();
-    expect(notice).toMatchObject({ kind: 'unreadable', problem: { code: 'entry-newer-version' }, shown: 'ours' });
-    expect(texts.get(notice?.kind === 'unreadable' ? notice.keptAs : '')).toBe(newer);
+    expect(notice).toMatchObject({ kind: 'unreadable', problem: { code: 'entry-checksum' }, shown: 'ours', text: damaged });
+    expect(texts.get(notice?.kind === 'unreadable' ? notice.keptAs : '')).toBe(damaged);
     expect(storedIn(texts).parents[0]!.name).toBe('typed');
   });
 });
@@ -243,6 +242,61 @@ describe('the file of the whole stock', () => {
     expect(read.ok).toBe(false);
     expect(store.getState()).toMatchObject({ stock: starter, undoLabel: null, notice: { kind: 'import-failed' } });
     expect(time.pending()).toBe(0);
+  });
+});
+
+describe('a stock of a newer program', () => {
+  const newer = '{"format":"fillwright-saved-stock","version":2}\n{}';
+
+  it('is never written over, and what is typed is not called saved', async () => {
+    const { actions, store, texts, time } = await room({ texts: { [stockKey]: newer } });
+    expect(store.getState()).toMatchObject({ save: { kind: 'withheld' }, notice: { kind: 'unreadable', keptAs: stockKey, text: newer, shown: 'starter' } });
+    actions.dismissNotice();
+    actions.run(renamed('typed'));
+    time.pass(delay);
+    expect(actions.flush()).toBe(false);
+    expect(store.getState()).toMatchObject({ save: { kind: 'withheld' }, notice: null });
+    expect([...texts]).toEqual([[stockKey, newer]]);
+  });
+
+  it('that another window wrote is told and left as it is', async () => {
+    const { room: open, store, texts, time, memory } = await room();
+    memory.window().write(stockKey, newer);
+    time.pass(delay);
+    expect(store.getState()).toMatchObject({ save: { kind: 'withheld' }, notice: { kind: 'unreadable', keptAs: stockKey, shown: 'ours' } });
+    expect(shown(open)).toBe(nitrogen.name);
+    expect([...texts]).toEqual([[stockKey, newer]]);
+  });
+});
+
+describe('a storage emptied elsewhere', () => {
+  it('gets our stock again, and is not called saved until then', async () => {
+    const { store, texts, time, memory } = await room();
+    memory.window().remove(stockKey);
+    expect(store.getState().save).toEqual({ kind: 'pending' });
+    time.pass(delay);
+    expect(storedIn(texts)).toEqual(starter);
+    expect(store.getState().save.kind).toBe('saved');
+  });
+
+  it('or damaged is told, the damaged text put aside', async () => {
+    const { store, texts, time, memory } = await room();
+    memory.window().write(stockKey, '{"cut off');
+    time.pass(delay);
+    expect(store.getState().notice).toMatchObject({ kind: 'unreadable', text: '{"cut off', shown: 'ours' });
+    expect([...texts.values()]).toContain('{"cut off');
+    expect(storedIn(texts)).toEqual(starter);
+  });
+});
+
+describe('a key for something new', () => {
+  it('never comes again, neither after a removal nor at the next start', async () => {
+    const { actions, memory, time } = await room();
+    const first = actions.newKey();
+    expect(actions.newKey()).not.toBe(first);
+    time.pass(60_000);
+    const next = await openRoom(memory.window(), time);
+    expect(next.actions.newKey()).not.toBe(first);
   });
 });
 

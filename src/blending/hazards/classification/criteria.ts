@@ -104,8 +104,9 @@ function fireCriteria(
   const sums = flammabilityRatio(gases, coefficients, values);
   const powers = oxidisingPowerRatio(gases, coefficients, values);
   const scale = fuelOxidiserScale(gases, values);
-  const pyrophoric = gases.some((gas, i) => pyrophoricGases.has(gas) && (x[i] ?? 0) > valueIn(values, pyrophoricFrom) / 100);
-  const unstable = gases.filter((gas, i) => chemicallyUnstableGases.has(gas) && (x[i] ?? 0) > worthSaying);
+  const contentOf = (gas: number): number => largest({ over: gases.map((_, i) => (i === gas ? 1 : 0)), under: gases.map(() => 1) });
+  const pyrophoric = gases.some((gas, i) => pyrophoricGases.has(gas) && contentOf(i) > valueIn(values, pyrophoricFrom) / 100);
+  const unstable = gases.filter((gas, i) => chemicallyUnstableGases.has(gas) && contentOf(i) > worthSaying);
   const plain = { lowerLimit: null, ammoniaOnly: false, pyrophoric, unstable };
   if (!sums.ok) return { ...plain, flammable: sums.reason, oxidising: sums.reason };
   if (!powers.ok) return { ...plain, flammable: powers.reason, oxidising: powers.reason };

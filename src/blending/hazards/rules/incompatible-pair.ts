@@ -58,10 +58,11 @@ function judge({ plan }: HazardContext): readonly Finding[] {
   return findings;
 }
 
+/** What a gas is to the plan; of a limit of detection, of which half is counted elsewhere, the whole counts here. */
 function partOf(plan: UncheckedPlan, gas: number): Part {
   if ((plan.finished.fractions[gas] ?? 0) <= nothing) return 'absent';
   const impurity = valueIn(plan.job.values, reactiveImpurity) * 1e-6;
-  const inParents = Math.max(0, ...usedParents(plan).map((parent) => parent.fractions[gas] ?? 0));
+  const inParents = Math.max(0, ...usedParents(plan).map(({ fractions, belowLimit }) => (fractions[gas] ?? 0) * (belowLimit.includes(gas) ? 2 : 1)));
   const left = plan.start?.fractions[gas] ?? 0;
   const leftPressure = left * (plan.start?.pressure ?? 0);
   const muchLeft = left > impurity && leftPressure > valueIn(plan.job.values, reactiveResidual) * 100;

@@ -1,15 +1,13 @@
-import { formatTemperature } from '../../../units/index.ts';
-import { instrumentWords as words } from '../../messages/hazards.ts';
 import { condensableParent } from '../../phase/liquefied.ts';
 import type { PlanStep, UncheckedPlan } from '../../plan/plan.ts';
 import type { JobParent } from '../../recipe/job.ts';
 import type { Finding } from '../finding.ts';
 import { usedParents } from '../plan-parts.ts';
-import { finding, NOT_COMPUTED } from '../rule.ts';
+import { finding } from '../rule.ts';
 import type { HazardContext, HazardRule, RuleCard } from '../rule.ts';
-import { showPressure } from '../show.ts';
 import { judgeSupply } from '../supply-judgement.ts';
 import type { SupplyJudgement } from '../supply-judgement.ts';
+import { tellSupply } from '../supply-words.ts';
 
 const card: RuleCard = {
   id: 'supply-pressure',
@@ -25,25 +23,16 @@ export const supplyPressure: HazardRule = { ...card, judge };
 function judge({ plan }: HazardContext): readonly Finding[] {
   return usedParents(plan).flatMap((parent) => {
     const steps = plan.steps.filter((step) => step.parent === parent.key);
-    const step = steps.reduce((highest, each) => (each.state.pressure > highest.state.pressure ? each : highest));
-    const judged = judgeSupply(parent, condensableParent(plan.job, parent), step.state.pressure, plan.job.values);
+    // Without a step it only purges, which `conditioning-supply` judges.
+    const step = steps.reduce<PlanStep | undefined>((highest, each) => (highest !== undefined && highest.state.pressure >= each.state.pressure ? highest : each), undefined);
+    if (step === undefined) return [];
+    const { batch, values } = plan.job;
+    const judged = judgeSupply(parent, condensableParent(plan.job, parent), step.state.pressure, batch.boosterInlet, values);
     return judged === null ? [] : [tell(plan, parent, step, judged)];
   });
 }
 
-const gasWords = {
-  'too-low': words.supplyTooLow,
-  margin: words.supplyMargin,
-  'not-stated': (name: string, _figure: string, stop: string) => words.supplyNotStated(name, stop),
-};
-
-const liquefiedWords = { 'too-low': words.liquefiedTooLow, margin: words.liquefiedMargin, 'not-stated': words.liquefiedNotStated };
-
-function tell(plan: UncheckedPlan, parent: JobParent, step: PlanStep, { verdict, code, liquefied, pressure }: SupplyJudgement): Finding {
-  const limit = showPressure(plan, step.state.pressure, step.gauge);
-  const figure = pressure === null ? NOT_COMPUTED : showPressure(plan, pressure, step.gauge);
-  const text = liquefied
-    ? liquefiedWords[code]({ name: parent.name, figure, stop: limit, step: step.number, at: formatTemperature(plan.job.conditions.roomTemperature) })
-    : gasWords[code](parent.name, figure, limit, step.number);
-  return finding(card, { verdict, place: { kind: 'parent', parent: parent.key }, words: text, figure, limit });
+function tell(plan: UncheckedPlan, parent: JobParent, { number, gauge, state }: PlanStep, judged: SupplyJudgement): Finding {
+  const aim = judged.needed < state.pressure ? `the inlet of the booster at step ${number}` : `the stop of step ${number}`;
+  return finding(card, { verdict: judged.verdict, place: { kind: 'parent', parent: parent.key }, ...tellSupply(plan, parent.name, judged, aim, gauge) });
 }

@@ -50,21 +50,22 @@ export const balanceCoarse = (step: number, figure: string, limit: string): Word
   remedy: 'Use a finer balance or a premix.',
 });
 
-export const supplyTooLow = (name: string, figure: string, stop: string, step: number): Words => ({
-  title: `Supply of ${name} ${figure}, below the stop of step ${step}`,
-  detail: `The stop is ${stop}. Flow would stop before it, and a higher cylinder pressure would push the mixture back into the parent.`,
+/** `aim`: what a parent has to reach, as in “the stop of step 2”. */
+export const supplyTooLow = (name: string, figure: string, needed: string, aim: string): Words => ({
+  title: `Supply of ${name} ${figure}, below ${aim}`,
+  detail: `It needs ${needed}. Flow would stop before it, and a higher cylinder pressure would push the mixture back into the parent.`,
   remedy: 'Take a fuller parent, a booster made for this gas, or another order of addition.',
 });
 
-export const supplyMargin = (name: string, figure: string, stop: string, step: number): Words => ({
-  title: `Supply of ${name} ${figure}, close to the stop of step ${step}`,
-  detail: `The stop is ${stop}. Filling slows towards the end, and the parent falls as it is drawn.`,
+export const supplyMargin = (name: string, figure: string, needed: string, aim: string): Words => ({
+  title: `Supply of ${name} ${figure}, close to ${aim}`,
+  detail: `It needs ${needed}. Filling slows towards the end, and the parent falls as it is drawn.`,
   remedy: 'Have a fuller parent at hand.',
 });
 
-export const supplyNotStated = (name: string, stop: string): Words => ({
+export const supplyNotStated = (name: string, needed: string): Words => ({
   title: `Supply pressure of ${name} not stated`,
-  detail: `Whether it reaches its stop of ${stop} cannot be judged; if it does not, the mixture flows back into the parent.`,
+  detail: `Whether it reaches the ${needed} needed cannot be judged; if it does not, the mixture flows back into the parent.`,
   remedy: 'Enter the supply pressure of this parent.',
 });
 
@@ -73,26 +74,27 @@ export interface LiquefiedSupply {
   readonly name: string;
   /** Its vapour pressure at room temperature. */
   readonly figure: string;
+  /** What it has to reach. */
   readonly stop: string;
-  readonly step: number;
+  readonly aim: string;
   /** Room temperature. */
   readonly at: string;
 }
 
-export const liquefiedTooLow = ({ name, figure, stop, step, at }: LiquefiedSupply): Words => ({
-  title: `${name} gives ${figure} as vapour, below the stop of step ${step}`,
-  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure} however full the cylinder is, and cannot push higher; the stop is ${stop}. A higher cylinder pressure would push the mixture back into it.`,
+export const liquefiedTooLow = ({ name, figure, stop, aim, at }: LiquefiedSupply): Words => ({
+  title: `${name} gives ${figure} as vapour, below ${aim}`,
+  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure} however full the cylinder is, and cannot push higher; it needs ${stop}. A higher cylinder pressure would push the mixture back into it.`,
   remedy: 'Add it earlier, at a lower total pressure, from a gaseous premix, or with a pump made for liquefied gas.',
 });
 
-export const liquefiedMargin = ({ name, figure, stop, step, at }: LiquefiedSupply): Words => ({
-  title: `${name} gives ${figure} as vapour, close to the stop of step ${step}`,
-  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure}, and lower once the cylinder cools as it is drawn; the stop is ${stop}. Filling slows towards the end.`,
+export const liquefiedMargin = ({ name, figure, stop, aim, at }: LiquefiedSupply): Words => ({
+  title: `${name} gives ${figure} as vapour, close to ${aim}`,
+  detail: `It is a liquefied gas: at ${at} its vapour stands at ${figure}, and lower once the cylinder cools as it is drawn; it needs ${stop}. Filling slows towards the end.`,
   remedy: 'Draw slowly and let the parent warm up, or add it at a lower total pressure.',
 });
 
 export const liquefiedNotStated = ({ name, figure, stop, at }: LiquefiedSupply): Words => ({
   title: `Supply pressure of ${name} not stated`,
-  detail: `While it holds liquid its vapour stands at ${figure} at ${at}, above the stop of ${stop}; once the liquid is gone it falls.`,
+  detail: `While it holds liquid its vapour stands at ${figure} at ${at}, above the ${stop} needed; once the liquid is gone it falls.`,
   remedy: 'Enter the supply pressure of this parent, or weigh it.',
 });

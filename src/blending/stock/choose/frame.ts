@@ -1,13 +1,12 @@
 import { fail, mole, ok, pascal } from '../../../units/index.ts';
 import type { Mole, Outcome, Pascal } from '../../../units/index.ts';
 import { realModel } from '../../../thermo/index.ts';
-import type { ThermoModel, ThermoReason } from '../../../thermo/index.ts';
+import type { ThermoReason } from '../../../thermo/index.ts';
 import { firstToCondense } from '../../phase/liquefied.ts';
-import { orderedFractions } from '../../plan/amounts.ts';
+import { conditionedResidual, orderedFractions, residualAbove } from '../../plan/amounts.ts';
 import type { Job } from '../../recipe/job.ts';
 import type { RecipeProblem } from '../../recipe/problem.ts';
-import { conditionCylinder } from '../../steps/conditioning.ts';
-import { cylinderVolume, settle, totalAmount } from '../../steps/cylinder.ts';
+import { cylinderVolume, settle } from '../../steps/cylinder.ts';
 import type { Vessel } from '../../steps/cylinder.ts';
 import { unitDensity } from '../../steps/unit-density.ts';
 
@@ -34,23 +33,25 @@ const NOTHING = 1e-6;
 export function frameOf(job: Job): Outcome<Frame, RecipeProblem> {
   const vessel: Vessel = { cylinder: job.cylinder, barometer: job.conditions.barometer };
   const ordered = orderedFractions(job);
+  const { contents } = job.cylinder;
   const purging = job.conditioning.flatMap((act) => (act.kind === 'purge' ? [job.parents[act.parent]!.fractions] : []));
-  const isThere = [ordered, job.cylinder.contents.fractions, ...purging];
+  const isThere = [ordered, contents.fractions, ...purging];
   const used = job.gases.map((_, i) => i).filter((i) => isThere.some((fractions) => fractions[i]! > 0));
   const narrow = (fractions: Float64Array): Float64Array => Float64Array.from(used, (i) => fractions[i]!);
   const { fillPressure, fillTemperature } = job.order;
   const noState = (where: 'residual' | 'finished gas' | 'model', reason: ThermoReason): RecipeProblem => ({
     code: 'no-state', field: where === 'residual' ? 'cylinder.contents' : 'order', where, reason,
     condenses: reason.code === 'no-gas-root' || reason.code === 'equation-breaks-down'
-      ? firstToCondense(job.gases, where === 'residual' ? job.cylinder.contents.fractions : ordered, fillTemperature) : null,
+      ? firstToCondense(job.gases, where === 'residual' ? contents.fractions : ordered, fillTemperature) : null,
   });
 
   const model = realModel(used.map((i) => job.gases[i]!));
   if (!model.ok) return fail(noState('model', model.reason));
-  const found = foundResidual(job, model.value, vessel, narrow);
-  if (!found.ok) return fail(noState('residual', found.reason));
-  const parents = job.parents.map((parent) => ({ ...parent, fractions: narrow(parent.fractions) }));
-  const conditioned = conditionCylinder(model.value, vessel, job.conditioning, parents, found.value, job.cylinder.contents.temperature);
+  const modelled: Job = {
+    ...job, gases: used.map((i) => job.gases[i]!), parents: job.parents.map((parent) => ({ ...parent, fractions: narrow(parent.fractions) })),
+    cylinder: { ...job.cylinder, contents: { ...contents, fractions: narrow(contents.fractions) } },
+  };
+  const conditioned = conditionedResidual(modelled, model.value, vessel);
   if (!conditioned.ok) {
     const { reason } = conditioned;
     if (reason.code !== 'purge-never-ends') return fail(noState('residual', reason));
@@ -58,13 +59,9 @@ export function frameOf(job: Job): Outcome<Frame, RecipeProblem> {
   }
   const residual = new Float64Array(job.gases.length);
   used.forEach((i, k) => (residual[i] = conditioned.value.contents[k]!));
-  if (totalAmount(residual) > 0) {
-    const warm = settle(model.value, vessel, conditioned.value.contents, fillTemperature);
-    if (warm.ok && warm.value.pressure >= fillPressure) {
-      return fail({
-        code: 'fill-pressure-too-low', field: 'order.fillPressure', residualPressure: pascal(warm.value.pressure), barometer: vessel.barometer,
-      });
-    }
+  const above = residualAbove(modelled, model.value, vessel, conditioned.value.contents);
+  if (above !== null) {
+    return fail({ code: 'fill-pressure-too-low', field: 'order.fillPressure', residualPressure: above, barometer: vessel.barometer });
   }
   const density = unitDensity(model.value, fillTemperature, fillPressure, narrow(ordered));
   if (!density.ok) return fail(noState('finished gas', density.reason));
@@ -72,20 +69,8 @@ export function frameOf(job: Job): Outcome<Frame, RecipeProblem> {
     job, vessel, residual, total: mole(density.value * cylinderVolume(vessel, fillPressure, fillTemperature)),
     pressureOfResidual: (share) => {
       if (share < NOTHING) return null;
-      const vented = settle(model.value, vessel, conditioned.value.contents.map((amount) => amount * share), job.cylinder.contents.temperature);
+      const vented = settle(model.value, vessel, conditioned.value.contents.map((amount) => amount * share), contents.temperature);
       return vented.ok ? pascal(vented.value.pressure) : null;
     },
   });
-}
-
-function foundResidual(
-  job: Job, model: ThermoModel, vessel: Vessel, narrow: (fractions: Float64Array) => Float64Array,
-): Outcome<Float64Array, ThermoReason> {
-  const { pressure, temperature } = job.cylinder.contents;
-  const x = narrow(job.cylinder.contents.fractions);
-  if (!(pressure > 0)) return ok(x.map(() => 0));
-  const density = unitDensity(model, temperature, pressure, x);
-  if (!density.ok) return density;
-  const amount = density.value * cylinderVolume(vessel, pressure, temperature);
-  return ok(x.map((fraction) => fraction * amount));
 }

@@ -48,6 +48,8 @@ export interface Impossible {
   /** What was considered, for whoever checks: most that each parent can give, mol (null: enough), and the finished amount. */
   readonly considered: readonly { readonly parent: string; readonly most: Mole | null }[];
   readonly total: Mole;
+  /** For showing pressures. */
+  readonly barometer: Pascal;
 }
 
 /** Explains why the program has no solution. */
@@ -55,7 +57,7 @@ export function explain(
   frame: Frame, program: Program, sources: readonly StockSource[], setAside: readonly SetAside[],
 ): Impossible {
   return {
-    code: 'impossible', setAside, total: frame.total,
+    code: 'impossible', setAside, total: frame.total, barometer: frame.job.conditions.barometer,
     shortage: shortageOf(frame, program, sources, setAside),
     nearest: nearestOf(frame, program, sources),
     remedies: remediesOf(frame, program),

@@ -1,5 +1,5 @@
 import { fail, ok } from '../../../units/index.ts';
-import type { Mole, Outcome } from '../../../units/index.ts';
+import type { Mole, Outcome, Pascal } from '../../../units/index.ts';
 import { planRecipe } from '../../plan/plan-recipe.ts';
 import type { Recipe } from '../../recipe/document.ts';
 import type { RecipeProblem } from '../../recipe/problem.ts';
@@ -26,6 +26,8 @@ import type { Goal, Shares, SolveProblem } from './solve.ts';
 /** Why an objective has no proposal. */
 export type ProposalProblem =
   | Impossible
+  /** Neither of two methods found parents that meet the order, and neither could prove that there are none. */
+  | { readonly code: 'undecided'; readonly setAside: readonly SetAside[]; readonly barometer: Pascal }
   /** The parents fit, but a plan with them has other problems. */
   | { readonly code: 'not-planned'; readonly recipe: Recipe; readonly problems: readonly RecipeProblem[] };
 
@@ -45,9 +47,6 @@ export interface Proposals {
 
 /** Choices within this ratio of the purest one are as pure: a limit of which half is counted is known no better. */
 const AS_PURE = 2;
-
-/** Times that parents are set aside and the choice made again. */
-const ROUNDS = 8;
 
 /**
  * Chooses among all parents of the stock those that fill the order of a recipe:
@@ -84,45 +83,62 @@ function proposalFor(
   objective: Objective, recipe: Recipe, frame: Frame, program: Program, sources: readonly StockSource[],
 ): Outcome<Proposal, ProposalProblem> {
   const setAside: SetAside[] = [];
-  for (let round = 0; ; round++) {
+  // Each round sets at least one parent more aside, so that it ends.
+  for (;;) {
     const allowed = sources.map(({ entry }) => setAside.every(({ parent }) => parent !== entry.key));
     const left = sources.filter((_, s) => allowed[s]!);
     const reduced: Program = { ...program, ingredients: program.ingredients.filter((_, s) => allowed[s]!) };
     const chosen = chooseParents(objective, frame, reduced, left);
-    if (chosen === null) return fail(explain(frame, reduced, left, setAside));
-    const proposed = recipeWith(recipe, chosen.sources.map(({ entry }) => entry));
+    if (!chosen.ok) {
+      return fail(chosen.reason.code === 'infeasible'
+        ? explain(frame, reduced, left, setAside) : { code: 'undecided', setAside, barometer: frame.job.conditions.barometer });
+    }
+    const choice = chosen.value;
+    const proposed = recipeWith(recipe, choice.sources.map(({ entry }) => entry));
     const first = planRecipe(proposed);
     if (!first.ok) return fail({ code: 'not-planned', recipe: proposed, problems: first.reason.problems });
     // The exact amounts may need one parent less than the program chose.
-    const used = chosen.sources.filter(({ entry }) => {
+    const used = choice.sources.filter(({ entry }) => {
       const key = proposed.parents.find(({ stock }) => stock === entry.key)?.key;
       return first.value.steps.some(({ parent }) => parent === key);
     });
-    const needed = used.length === chosen.sources.length ? proposed : recipeWith(recipe, used.map(({ entry }) => entry));
+    const needed = used.length === choice.sources.length ? proposed : recipeWith(recipe, used.map(({ entry }) => entry));
     const plan = needed === proposed ? first : planRecipe(needed);
     if (!plan.ok) return fail({ code: 'not-planned', recipe: needed, problems: plan.reason.problems });
-    const short = round < ROUNDS ? fallingShort(needed, plan.value) : [];
-    if (short.length === 0) return ok(proposalOf(objective, needed, plan.value, setAside, chosen.proven));
-    setAside.push(...short, ...short.flatMap((each) => alikeAndLower(each, reduced, left)));
+    const short = fallingShort(needed, plan.value);
+    if (short.length === 0) return ok(proposalOf(objective, needed, plan.value, setAside, choice.proven));
+    const before = setAside.length;
+    for (const each of [...short, ...short.flatMap((one) => alikeAndLower(one, reduced, left))]) {
+      if (setAside.every(({ parent }) => parent !== each.parent)) setAside.push(each);
+    }
+    // What falls short is set aside already and stays only to purge: nothing is left to try.
+    if (setAside.length === before) return fail(explain(frame, reduced, left, setAside));
   }
 }
 
-/** Parents like one that stands too low, and no higher: in its place they would not reach the stop either. */
+/**
+ * Parents like one that stands too low, and no higher: in its place they would not
+ * reach the stop either. Of one that runs out those that hold no more besides: their
+ * pressure falls by as much or further.
+ */
 function alikeAndLower(one: SetAside, program: Program, sources: readonly StockSource[]): readonly SetAside[] {
   const index = sources.findIndex(({ entry }) => entry.key === one.parent);
   const { pressure: stands } = one;
-  if (one.code !== 'pressure' || stands === null || index < 0) return [];
+  if (stands === null || index < 0) return [];
+  const heldBy = (s: number): number | null => program.ingredients[s]!.reach.held;
+  const held = heldBy(index);
   return sources.flatMap(({ entry, parent }, s) => {
     const isLower = s !== index && parent.filling === 'gas' && parent.pressure !== null && parent.pressure <= stands;
-    return isLower && areAlike(program, program.ingredients[s]!, program.ingredients[index]!)
+    const holdsLess = one.code === 'pressure' || (held !== null && (heldBy(s) ?? Infinity) <= held);
+    return isLower && holdsLess && areAlike(program, program.ingredients[s]!, program.ingredients[index]!)
       ? [{ ...one, parent: entry.key, name: entry.name, pressure: parent.pressure }] : [];
   });
 }
 
-/** The parents to fill from, small amounts first and the one richest in the balance last; null: none will do. */
+/** The parents to fill from, small amounts first and the one richest in the balance last. Fails with `infeasible` when none will do. */
 function chooseParents(
   objective: Objective, frame: Frame, program: Program, sources: readonly StockSource[],
-): { readonly sources: readonly StockSource[]; readonly proven: boolean } | null {
+): Outcome<{ readonly sources: readonly StockSource[]; readonly proven: boolean }, SolveProblem> {
   const balance = frame.job.order.components.findIndex(({ isBalance }) => isBalance);
   const ranked = (used: readonly number[], shares: readonly number[]): readonly StockSource[] => {
     const richness = (s: number): number => program.ingredients[s]!.contents[balance] ?? 0;
@@ -133,15 +149,15 @@ function chooseParents(
   const least = leastUnordered(program);
   if (!least.ok) {
     const shares = sharesByLeastSquares(program);
-    return shares === null ? null : { sources: ranked(inUse(shares), shares), proven: false };
+    return shares === null ? least : ok({ sources: ranked(inUse(shares), shares), proven: false });
   }
   const unordered = Math.min(program.unorderedAllowed, Math.max(least.value * AS_PURE, program.unorderedUnnoticed));
   const best = cheapestOfKinds(program, goalOf(objective, frame, program, sources, unordered));
   // Where the search among whole numbers gives up, the plain program serves; where that does, the plan makes do with the whole rack.
   const found = best.ok ? best : cheapest(program, goalOf('least gas', frame, program, sources, unordered));
-  if (!found.ok) return { sources, proven: false };
+  if (!found.ok) return ok({ sources, proven: false });
   const { shares } = found.value;
-  return { sources: ranked(withoutMakeweights(program, shares, unordered), shares), proven: best.ok && best.value.proven };
+  return ok({ sources: ranked(withoutMakeweights(program, shares, unordered), shares), proven: best.ok && best.value.proven });
 }
 
 /** As `cheapest`, without doubles at first, so that a large rack is no slower than a small one. */

@@ -19,6 +19,10 @@ export interface TableReading<Entry> {
   readonly entries: readonly Entry[];
   readonly problems: readonly TableProblem[];
   readonly unread: readonly { readonly row: number; readonly cells: readonly string[] }[];
+  /** Keys that the table states itself; the others were made of the names. */
+  readonly statedKeys: readonly string[];
+  /** The head line and the rows of `unread`, to be mended and read again; empty: nothing is left. */
+  readonly rest: string;
 }
 
 /** A table of this length is not worth parsing. */
@@ -35,11 +39,12 @@ export function readTable<Entry extends { readonly key: string }>(
   table: Table<Entry>, text: string, assumed: readonly string[] | null = null,
   complete: (entry: Entry, row: number, problems: TableProblem[]) => Entry = (entry) => entry,
 ): TableReading<Entry> {
-  const nothing = { entries: [], unread: [] };
+  const nothing = { entries: [], unread: [], statedKeys: [], rest: '' };
   if (text.length > largestTable) {
     return { ...nothing, problems: [{ code: 'table-too-large', characters: text.length, limit: largestTable }] };
   }
-  const { rows, badQuotes } = readCells(text, delimiterOf(table, text));
+  const delimiter = delimiterOf(table, text);
+  const { rows, badQuotes } = readCells(text, delimiter);
   const first = rows.findIndex((row) => row.some((cell) => cell !== ''));
   if (first < 0) return { ...nothing, problems: [{ code: 'table-empty' }] };
   const isHeadless = assumed !== null && !rows[first]!.some((cell) => columnOf(table, cell) !== undefined);
@@ -48,6 +53,7 @@ export function readTable<Entry extends { readonly key: string }>(
   const columns = matchHeads(table, heads, problems);
   const entries: Entry[] = [];
   const unread: { row: number; cells: readonly string[] }[] = [];
+  const statedKeys: string[] = [];
   const keys = new Set<string>();
   for (const [index, cells] of rows.entries()) {
     if ((!isHeadless && index <= first) || cells.every((cell) => cell === '')) continue;
@@ -56,8 +62,9 @@ export function readTable<Entry extends { readonly key: string }>(
     const entry = read === null ? null : admit(table, complete(read, row, problems), keys, row, problems, entries.length);
     if (entry === null) unread.push({ row, cells });
     else entries.push(entry);
+    if (entry !== null && read?.key === entry.key) statedKeys.push(entry.key);
   }
-  return { entries, problems, unread };
+  return { entries, problems, unread, statedKeys, rest: restOf(isHeadless ? [] : [heads], unread, badQuotes, delimiter) };
 }
 
 /** Writes a list of the stock as the text of a table that `readTable` reads back to the same list. */
@@ -68,6 +75,15 @@ export function writeTable<Entry extends { readonly key: string }>(
     [table.columns.map(({ header }) => header), ...entries.map((entry) => table.columns.map((column) => column.write(entry)))],
     delimiter,
   );
+}
+
+/** Rows whose quotes did not close come last, with a quote that does not close, so that they are not taken for sound ones. */
+function restOf(heads: readonly (readonly string[])[], unread: TableReading<never>['unread'], badQuotes: readonly number[], delimiter: Delimiter): string {
+  if (unread.length === 0) return '';
+  const isBad = ({ row }: { readonly row: number }): boolean => badQuotes.includes(row);
+  const sound = [...heads, ...unread.filter((each) => !isBad(each)).map(({ cells }) => cells)];
+  const bad = unread.filter(isBad).map(({ cells }) => `"${cells.join(delimiter).replaceAll('"', '""')}`);
+  return [sound.length === 0 ? '' : withoutMark(writeCells(sound, delimiter)).trimEnd(), ...bad].filter((line) => line !== '').join('\r\n');
 }
 
 /** The separator with which the head line has the most known heads; a comma inside amounts is no separator then. */

@@ -1,4 +1,6 @@
-import { parseMass, parsePressureDifference, parsePressureUnit, parseRelative, parseTemperature, parseVolume } from '../../../units/index.ts';
+import {
+  parseMass, parseNumberText, parsePressure, parsePressureDifference, parsePressureUnit, parseRelative, parseTemperature, parseVolume, pascal,
+} from '../../../units/index.ts';
 import { unstatedPressure } from '../../recipe/defaults.ts';
 import type { Balance, StockCylinder, StockGauge, StockParent, Thermometer } from '../document.ts';
 import { choiceColumn, dateCheck, entryCheck, pressureColumn, purityColumn, textColumn } from './column.ts';
@@ -16,7 +18,17 @@ const mass = entryCheck(parseMass);
 const relative = entryCheck(parseRelative);
 const massOrShare: CellCheck = (text) => (parseMass(text).ok ? null : relative(text));
 /** A temperature difference is typed as one: `0.2 K`. */
-const kelvins: CellCheck = (text) => (/^\D*\d.*[KC]$/.test(text) ? null : temperature(text));
+const kelvins: CellCheck = (text) => {
+  const number = parseNumberText(text);
+  if (!number.ok) return { code: 'entry', problem: number.reason };
+  const unit = number.value.rest.trim();
+  const understood = ['K', '°C'];
+  if (unit === '') return { code: 'entry', problem: { code: 'unit-missing', text, understood } };
+  if (!understood.includes(unit)) return { code: 'entry', problem: { code: 'unknown-unit', text, unit, understood } };
+  return number.value.value < 0 ? { code: 'entry', problem: { code: 'negative', text } } : null;
+};
+/** A bare number is in the unit of the gauge, whichever that is: only whether it can be read is asked here. */
+const fullScale = entryCheck((text) => parsePressure(text, { unit: 'bar', reference: 'gauge', barometer: pascal(101_325) }));
 
 /**
  * Parents: key, name, purity table, pressure, temperature, water capacity,
@@ -82,7 +94,7 @@ export const gaugeTable: Table<StockGauge> = {
     textColumn('name', 'gauge', { also: ['name'], needed: true }),
     textColumn('unit', 'unit', { needed: true, check: entryCheck(parsePressureUnit) }),
     choiceColumn('reference', 'reference', ['gauge', 'absolute']),
-    textColumn('fullScale', 'full scale', { also: ['range'], needed: true }),
+    textColumn('fullScale', 'full scale', { also: ['range'], needed: true, check: fullScale }),
     textColumn('accuracy', 'accuracy', { needed: true, check: relative }),
     choiceColumn('accuracyOf', 'accuracy of', ['span', 'reading'], { otherwise: 'span' }),
     textColumn('resolution', 'resolution', { needed: true, check: entryCheck((text) => parsePressureDifference(text, 'bar')) }),

@@ -1,8 +1,9 @@
 import { lazy, Suspense, useMemo } from 'react';
-import { gasLabel, pressureOverTemperature } from '../../../blending/index.ts';
+import { gasLabel } from '../../../blending/index.ts';
 import type { Plan, PlanAnswer, PlannedComponent } from '../../../blending/index.ts';
 import { formatMass, formatSignificant, formatTemperature, formatVolume, fromPascal, pressureReading } from '../../../units/index.ts';
 import type { Pascal } from '../../../units/index.ts';
+import { useCurves } from '../../parts/curves.ts';
 import { WorkingFigure } from '../../parts/WorkingFigure.tsx';
 import { amountText, percentNumber, pressureNumber, relativePercent, scaleLabel, scaleOf } from '../../parts/show.ts';
 import type { Scale } from '../../parts/show.ts';
@@ -111,7 +112,8 @@ function Totals({ plan }: { readonly plan: Plan }) {
 }
 
 function Developed({ plan, scale }: { readonly plan: Plan; readonly scale: Scale }) {
-  const points = useMemo(() => pressureOverTemperature(plan, -20, 70, 46), [plan]);
+  const { pressureOverTemperature } = useCurves();
+  const points = useMemo(() => pressureOverTemperature(plan, -20, 70, 46), [pressureOverTemperature, plan]);
   const on = (pressure: Pascal) => pressureReading(pressure, scale);
   const { workingPressure, testPressure } = plan.job.cylinder;
   const limits = [

@@ -1,7 +1,8 @@
 import { lazy, Suspense, useState } from 'react';
-import { gasLabel, mixingCurveOf, mixingPointOf, STANDARD_PRESSURE } from '../../../blending/index.ts';
+import { gasLabel, STANDARD_PRESSURE } from '../../../blending/index.ts';
 import type { GasId, MixingCurvePoint, Plan } from '../../../blending/index.ts';
 import { formatNumber, formatTemperature } from '../../../units/index.ts';
+import { useCurves } from '../../parts/curves.ts';
 import { pressureNumber } from '../../parts/show.ts';
 
 const MixingChart = lazy(() => import('../../charts/MixingChart.tsx'));
@@ -18,6 +19,7 @@ export function TwoGasCurves({ plan }: { readonly plan: Plan }) {
   const second = choice[1] !== null && gases.includes(choice[1]) ? choice[1] : gases[0];
   const { temperature } = plan.finished;
   const pressure = atFill ? plan.finished.pressure : STANDARD_PRESSURE[plan.job.conditions.standardPressure];
+  const { mixingCurveOf, mixingPointOf } = useCurves();
   if (first === undefined || second === undefined) return null;
   const fraction = (gas: GasId) => ordered.find((component) => component.gas === gas)?.planned ?? 0;
   const curve = first === second ? [] : mixingCurveOf(first, second, temperature, pressure, POINTS);

@@ -1,5 +1,5 @@
 import { lazy, Suspense, useMemo } from 'react';
-import { pressureAlongFill } from '../../../blending/index.ts';
+import { useCurves } from '../../parts/curves.ts';
 import type { Plan } from '../../../blending/index.ts';
 import { fromPascal } from '../../../units/index.ts';
 
@@ -7,7 +7,8 @@ const FillCurveChart = lazy(() => import('../../charts/FillCurveChart.tsx'));
 
 /** Real against ideal pressure through the whole fill, and what the ideal stops would have made. */
 export function FillCurve({ plan }: { readonly plan: Plan }) {
-  const curve = useMemo(() => pressureAlongFill(plan), [plan]);
+  const { pressureAlongFill } = useCurves();
+  const curve = useMemo(() => pressureAlongFill(plan), [pressureAlongFill, plan]);
   const bar = (pressure: Parameters<typeof fromPascal>[0] | null) => (pressure === null ? null : fromPascal(pressure, 'bar'));
   const points = curve.map(({ amount, real, ideal }) => ({ amount, real: bar(real), ideal: bar(ideal) }));
   const stops = curve.flatMap(({ amount, stopOf }) => (stopOf === null ? [] : [{ amount, step: stopOf }]));

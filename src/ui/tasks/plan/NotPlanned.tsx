@@ -1,9 +1,15 @@
 import { recipeSentence } from '../../../blending/index.ts';
 import type { RecipeProblem } from '../../../blending/index.ts';
+import type { View } from '../../Header.tsx';
 import { fieldId } from '../../bindings/problems.tsx';
 
 /** Leads to the field, opening the fold or the parent's sheet that hides it. */
-function goTo(field: string): void {
+function goTo(field: string, onView: ((view: View) => void) | undefined): void {
+  const elsewhere = ELSEWHERE.find(([pattern]) => pattern.test(field))?.[1];
+  if (elsewhere !== undefined && onView !== undefined) {
+    onView(elsewhere);
+    return;
+  }
   const target = document.getElementById(fieldId(field));
   target?.closest('details')?.setAttribute('open', '');
   target?.focus();
@@ -11,7 +17,7 @@ function goTo(field: string): void {
 }
 
 /** What stands in the way of a plan. No figures are shown then: old ones would be mistaken for good ones. */
-export function NotPlanned({ problems }: { readonly problems: readonly RecipeProblem[] }) {
+export function NotPlanned({ problems, onView }: { readonly problems: readonly RecipeProblem[]; readonly onView?: (view: View) => void }) {
   return (
     <section aria-labelledby="not-planned-title" className="not-planned">
       <h2 id="not-planned-title">Not planned yet</h2>
@@ -19,7 +25,7 @@ export function NotPlanned({ problems }: { readonly problems: readonly RecipePro
       <ul>
         {problems.map((problem) => (
           <li key={`${problem.field} ${problem.code}`}>
-            <button type="button" className="plain" onClick={() => { goTo(problem.field); }}>{placeOf(problem.field)}</button>
+            <button type="button" className="plain" onClick={() => { goTo(problem.field, onView); }}>{placeOf(problem.field)}</button>
             {' '}{recipeSentence(problem)}
           </li>
         ))}
@@ -27,6 +33,12 @@ export function NotPlanned({ problems }: { readonly problems: readonly RecipePro
     </section>
   );
 }
+
+/** Fields that stand in another view than the slip. */
+const ELSEWHERE: readonly (readonly [RegExp, View])[] = [
+  [/^(?:conditioning|batch|route\.split)/, 'route'],
+  [/^values/, 'values'],
+];
 
 const PLACES: readonly (readonly [RegExp, string])[] = [
   [/^order\.components/, 'Order'],
@@ -37,6 +49,10 @@ const PLACES: readonly (readonly [RegExp, string])[] = [
   [/^cylinder/, 'Cylinder'],
   [/^parents/, 'Parent gases'],
   [/^gauges/, 'Gauges'],
+  [/^conditioning/, 'Conditioning'],
+  [/^batch/, 'Number of cylinders'],
+  [/^values/, 'Laboratory’s own value'],
+  [/^route\.split/, 'Split addition'],
   [/^route/, 'Steps'],
   [/^conditions\.barometer/, 'Barometer'],
   [/^conditions/, 'Instruments and room'],

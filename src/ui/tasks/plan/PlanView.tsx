@@ -1,9 +1,9 @@
-import { memo, useDeferredValue, useLayoutEffect, useRef, useState } from 'react';
+import { lazy, memo, Suspense, useDeferredValue, useLayoutEffect, useRef, useState } from 'react';
 import type { RefObject } from 'react';
 import type { Plan, PlanAnswer } from '../../../blending/index.ts';
+import type { View } from '../../Header.tsx';
 import { ModelLine } from './ModelLine.tsx';
 import { FillLadder } from './FillLadder.tsx';
-import { FillCurve } from './FillCurve.tsx';
 import { NotPlanned } from './NotPlanned.tsx';
 import { StepTable } from './StepTable.tsx';
 
@@ -14,11 +14,12 @@ const NARROWEST_COLUMN = 84;
 const WIDEST_COLUMN = 210;
 
 const Ladder = memo(FillLadder);
-const Curve = memo(FillCurve);
+// Below the figures, and drawn when there is time.
+const Curve = memo(lazy(async () => ({ default: (await import('./FillCurve.tsx')).FillCurve })));
 
 /** The plan in picture and numbers, or what stands in its way. */
-export function PlanView({ answer }: { readonly answer: PlanAnswer }) {
-  return answer.ok ? <Planned plan={answer.value} /> : <NotPlanned problems={answer.reason.problems} />;
+export function PlanView({ answer, onView }: { readonly answer: PlanAnswer; readonly onView: (view: View) => void }) {
+  return answer.ok ? <Planned plan={answer.value} /> : <NotPlanned problems={answer.reason.problems} onView={onView} />;
 }
 
 function Planned({ plan }: { readonly plan: Plan }) {
@@ -37,7 +38,7 @@ function Planned({ plan }: { readonly plan: Plan }) {
         <StepTable plan={plan} columnWidth={columnWidth} hasStart={hasStart} />
       </div>
       <ModelLine plan={plan} />
-      <Curve plan={drawn} />
+      <Suspense fallback={null}><Curve plan={drawn} /></Suspense>
     </section>
   );
 }

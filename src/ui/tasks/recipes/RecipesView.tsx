@@ -3,6 +3,7 @@ import { emptyRecipe } from '../../../blending/index.ts';
 import { savedEntrySentence } from '../../../state/index.ts';
 import type { LibraryEntry } from '../../../state/index.ts';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
+import { useStock } from '../../bindings/stockroom.tsx';
 import { handOutFile } from './files.ts';
 
 /** The saved recipes: open, rename, duplicate, delete, export, import. */
@@ -10,8 +11,9 @@ export function RecipesView({ onOpened }: { readonly onOpened: () => void }) {
   const library = useWorkspaceState((state) => state.library);
   const openId = useWorkspaceState((state) => state.openId);
   const actions = useActions();
-  const { gauges, conditions, values } = useWorkspaceState((state) => state.recipe);
-  // The laboratory's gauges, room and own values are the same for the next recipe.
+  const { gauges, conditions } = useWorkspaceState((state) => state.recipe);
+  const values = useStock((state) => state.stock.values);
+  // The laboratory's gauges and room are the same for the next recipe, and it is judged by the laboratory's own values.
   const create = () => { if (actions.create({ ...emptyRecipe, route: { ...emptyRecipe.route, sequence: 'best' }, gauges, conditions, values }).ok) onOpened(); };
   return (
     <section aria-labelledby="recipes-title">

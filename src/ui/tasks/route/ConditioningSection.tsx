@@ -114,11 +114,11 @@ function ResidualHelp({ answer, purgeParent }: { readonly answer: PlanAnswer; re
     return <button type="button" className="plain strong" onClick={() => { actions.run(addConditioning({ kind: 'lower', to: absolute('0.1 mbar') })); }}>Evacuate the residual to 0.1 mbar absolute</button>;
   }
   // A little below, so that the rounded figure still does.
-  const bar = Math.floor(0.99 * ventTo / 100) / 1000;
+  const millibar = Number((0.99 * ventTo / 100).toPrecision(3));
   const wanted = `${formatSignificant(Math.min(90, (90 * ventTo) / 1.1e5), 2)} %`;
   return (
     <>
-      <button type="button" className="plain strong" onClick={() => { actions.run(addConditioning({ kind: 'lower', to: absolute(`${String(bar)} bar`) })); }}>Let out or pump the residual to {bar} bar absolute</button>
+      <button type="button" className="plain strong" onClick={() => { actions.run(addConditioning({ kind: 'lower', to: absolute(`${String(millibar)} mbar`) })); }}>Let out or pump the residual to {millibar} mbar absolute</button>
       {purgeParent !== '' && (
         <button type="button" className="plain strong" onClick={() => { actions.run(addConditioning({ kind: 'purge', parent: purgeParent, low: absolute('1.1 bar'), high: absolute('5 bar'), cycles: '', wanted })); }}>
           Purge it until {wanted} of it is left

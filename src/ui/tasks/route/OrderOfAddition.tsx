@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import type { Criterion, Plan, RecipeStudy, Recipe } from '../../../blending/index.ts';
+import type { Criterion, Job, Plan, RecipeStudy, Recipe } from '../../../blending/index.ts';
 import { arrangeParents, editRoute } from '../../../state/index.ts';
 import { useCalculation } from '../../bindings/calculator.tsx';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
@@ -30,18 +30,23 @@ function Answer({ plan, recipe, result, current }: { readonly plan: Plan; readon
     const { reason } = result.answer;
     return <p className="problem">{reason.code === 'not-planned' ? 'There is no plan to order yet.' : orderProblemSentence(plan.job, reason)}</p>;
   }
-  // An answer of another set of parents would name the wrong ones.
-  if (!current && result.answer.value.own.steps.length !== plan.steps.length) return <p className="hint" role="status">Every order is being judged…</p>;
-  return <Study plan={plan} recipe={recipe} answer={result.answer.value} />;
+  return <Study recipe={recipe} answer={result.answer.value} current={current} />;
 }
 
-function Study({ plan, recipe, answer }: { readonly plan: Plan; readonly recipe: Recipe; readonly answer: RecipeStudy }) {
+interface StudyProps {
+  readonly recipe: Recipe;
+  readonly answer: RecipeStudy;
+  /** Whether it is the answer of the recipe as it is now; an older one is shown, and nothing can be done with it. */
+  readonly current: boolean;
+}
+
+function Study({ recipe, answer, current }: StudyProps) {
   const actions = useActions();
   const { costText, criterionText, orderText, whySentence } = useRouteTools();
-  const { job } = plan;
-  const { study, own } = answer;
+  const { job, study, own } = answer;
   const { counts } = study;
   const take = (list: readonly ListedAddition[]) => {
+    if (!current) return;
     const { keys, split } = asRoute(list);
     actions.run(arrangeParents(keys, split));
   };
@@ -57,9 +62,9 @@ function Study({ plan, recipe, answer }: { readonly plan: Plan; readonly recipe:
           : <>A better order is known: <b>{orderText(job, study.chosen.arrangement)}</b>. {decided !== undefined && `It is better by ${criterionText[decided]}: ${costText(decided, study.chosen.cost)} against ${costText(decided, own.cost)}.`}</>}
       </p>
       <p className="dialog-actions">
-        {!isBest && <button type="button" className="strong-button" onClick={() => { take(listed(job, study.chosen.arrangement)); }}>Use the best order</button>}
+        {!isBest && <button type="button" className="strong-button" disabled={!current} onClick={() => { take(listed(job, study.chosen.arrangement)); }}>Use the best order</button>}
         {recipe.route.sequence !== 'best' && <button type="button" className="plain" onClick={() => { actions.run(editRoute({ sequence: 'best' })); }}>Let the checks choose from now on</button>}
-        <SplitButton plan={plan} list={ownList} onTake={take} />
+        <SplitButton job={job} list={ownList} onTake={take} />
       </p>
       <AdditionList job={job} order={own} list={ownList} onTake={take} />
       <CostTable answer={answer} isBest={isBest} />
@@ -70,7 +75,7 @@ function Study({ plan, recipe, answer }: { readonly plan: Plan; readonly recipe:
             {study.rejected.map((order) => (
               <li key={`${order.name} ${orderText(job, order.arrangement)}`}>
                 <p>{order.sentence}</p>
-                <p className="hint">{orderText(job, order.arrangement)}{' '}<button type="button" className="plain" onClick={() => { take(listed(job, order.arrangement)); }}>Use it</button></p>
+                <p className="hint">{orderText(job, order.arrangement)}{' '}<button type="button" className="plain" disabled={!current} onClick={() => { take(listed(job, order.arrangement)); }}>Use it</button></p>
               </li>
             ))}
           </ul>
@@ -103,7 +108,7 @@ function CostTable({ answer: { study, own }, isBest }: { readonly answer: Recipe
 }
 
 /** Some of a parent before, the rest at its place. */
-function SplitButton({ plan, list, onTake }: { readonly plan: Plan; readonly list: readonly ListedAddition[]; readonly onTake: (list: readonly ListedAddition[]) => void }) {
+function SplitButton({ job, list, onTake }: { readonly job: Job; readonly list: readonly ListedAddition[]; readonly onTake: (list: readonly ListedAddition[]) => void }) {
   const parents = useWorkspaceState((state) => state.recipe.parents);
   const [last] = list.slice(-1);
   const [open, setOpen] = useState(false);
@@ -112,7 +117,7 @@ function SplitButton({ plan, list, onTake }: { readonly plan: Plan; readonly lis
   if (split !== undefined) {
     return (
       <button type="button" className="plain" onClick={() => { onTake(list.filter((addition) => addition !== split).map((addition) => (addition.parent === split.parent ? { ...addition, share: 1 } : addition))); }}>
-        Add {nameOf(plan, split.parent)} in one part again
+        Add {nameOf(job, split.parent)} in one part again
       </button>
     );
   }
@@ -121,12 +126,12 @@ function SplitButton({ plan, list, onTake }: { readonly plan: Plan; readonly lis
     <span>
       Split{' '}
       {list.slice(1).map(({ parent }) => (
-        <button key={parent} type="button" className="plain" onClick={() => { setOpen(false); onTake(withSplit(list, parents, parent)); }}>{nameOf(plan, parent)}</button>
+        <button key={parent} type="button" className="plain" onClick={() => { setOpen(false); onTake(withSplit(list, parents, parent)); }}>{nameOf(job, parent)}</button>
       ))}
     </span>
   );
 }
 
-function nameOf(plan: Plan, key: string): string {
-  return plan.job.parents.find((parent) => parent.key === key)?.name ?? key;
+function nameOf(job: Job, key: string): string {
+  return job.parents.find((parent) => parent.key === key)?.name ?? key;
 }

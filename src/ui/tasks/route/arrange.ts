@@ -41,7 +41,7 @@ export function shareText(share: number): string {
   return `${String(Math.round(share * 1e6) / 1e4)} %`;
 }
 
-/** The list with the last addition of the richest parent split in two halves, the early part straight before its neighbour; itself where nothing can be split. */
+/** The list with the addition of one parent split in two halves, the early part straight before its neighbour; itself where nothing can be split. */
 export function withSplit(list: readonly ListedAddition[], parents: readonly Parent[], parent: string): readonly ListedAddition[] {
   const place = list.findIndex((addition) => addition.parent === parent);
   if (place < 1 || !parents.some(({ key }) => key === parent)) return list;

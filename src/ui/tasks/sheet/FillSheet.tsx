@@ -23,7 +23,7 @@ export function FillSheet({ program }: { readonly program: string }) {
   const gauges = recipe.gauges.filter(({ key, calibrated }) => calibrated !== '' && plan.steps.some(({ gauge }) => gauge === key)).map(({ name, calibrated }) => `${name} calibrated ${calibrated}`);
   const instruments = [...gauges, thermometer, balance].filter((words) => words !== '').map((words) => ` · ${words}`).join('');
   return (
-    <article className={isDense(plan) ? 'sheet dense' : 'sheet'} aria-label="Fill sheet">
+    <article className={`sheet ${density(plan)}`} aria-label="Fill sheet">
       <header className="sheet-head">
         <div>
           <h1>Fill sheet</h1>
@@ -50,11 +50,12 @@ export function FillSheet({ program }: { readonly program: string }) {
   );
 }
 
-/** Whether everything must be set smaller to stay on one page. The heights are rough, in mm on Letter, the lower paper. */
-function isDense({ job, steps, findings }: Plan): boolean {
+/** How much smaller everything must be set to stay on one page. The heights are rough, in mm on Letter, the lower paper. */
+function density({ job, steps, findings }: Plan): '' | 'dense' | 'dense tight' {
   const holds = findings.filter(({ verdict }) => verdict === 'hold').length;
   const cautions = findings.filter(({ verdict }) => verdict === 'caution').length;
-  return 16 * steps.length + 5 * job.conditioning.length + 5 * (holds + cautions) + (holds > 0 ? 9 + 7 * holds : 0) > 115;
+  const height = 16 * steps.length + 5 * job.conditioning.length + 5 * (holds + cautions) + (holds > 0 ? 9 + 7 * holds : 0);
+  return height > 180 ? 'dense tight' : height > 115 ? 'dense' : '';
 }
 
 function Holds({ plan }: { readonly plan: Plan }) {

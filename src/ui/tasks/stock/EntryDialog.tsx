@@ -15,15 +15,25 @@ interface EntryDialogProps<List extends StockList> {
 export function EntryDialog<List extends StockList>({ view, entry, onClose }: EntryDialogProps<List>) {
   const { room, commands } = useStockroom();
   const columns = view.table.columns.filter(({ header }) => header !== 'key');
+  // Texts being typed, by column: they outlive the sheet, which opens once more where one of them was not taken.
+  const [drafts, setDrafts] = useState<Readonly<Record<string, string>>>({});
+  const [asked, setAsked] = useState(false);
+  const lost = columns.filter(({ header, read }) => drafts[header] !== undefined && read(drafts[header]).part === null).map(({ header }) => header);
+  const close = () => {
+    if (lost.length === 0 || asked) onClose();
+    else setAsked(true);
+  };
   return (
-    <Dialog title={view.table.called(entry) === '' ? `New ${view.one}` : view.table.called(entry)} onClose={onClose} wide>
+    <Dialog key={String(asked)} title={view.table.called(entry) === '' ? `New ${view.one}` : view.table.called(entry)} onClose={close} wide>
       {columns.map((column) => (
         <Cell
-          key={column.header} column={column} entry={entry}
+          key={column.header} column={column} entry={entry} typed={drafts[column.header] ?? null}
+          onTyped={(typed) => { setDrafts(({ [column.header]: _, ...others }) => (typed === null ? others : { ...others, [column.header]: typed })); }}
           onPart={(part) => { room.actions.run(commands.editStock(view.list, entry.key, part)); }}
         />
       ))}
       {view.list === 'parents' && <PastePurity onPaste={(composition) => { room.actions.run(commands.editStock('parents', entry.key, { composition })); }} />}
+      {asked && lost.length > 0 && <p className="problem" role="alert">What is typed at {lost.join(', ')} was not taken. Mend it, or close again to let it go.</p>}
       <p className="dialog-actions">
         <button type="button" className="plain remove-long" onClick={() => { room.actions.run(commands.removeStock(view.list, entry.key)); onClose(); }}>Remove this {view.one}</button>
       </p>
@@ -34,24 +44,25 @@ export function EntryDialog<List extends StockList>({ view, entry, onClose }: En
 interface CellProps<Entry> {
   readonly column: Column<Entry>;
   readonly entry: Entry;
+  /** While one types, the text stays as typed; afterwards it is as the stock writes it. */
+  readonly typed: string | null;
+  readonly onTyped: (typed: string | null) => void;
   readonly onPart: (part: Partial<Entry>) => void;
 }
 
 /** One field: the text as it is typed, with the sentence that says what is wrong with it. */
-function Cell<Entry>({ column, entry, onPart }: CellProps<Entry>) {
+function Cell<Entry>({ column, entry, typed, onTyped, onPart }: CellProps<Entry>) {
   const { tools } = useStockroom();
-  // While one types, the text stays as typed; afterwards it is as the stock writes it.
-  const [typed, setTyped] = useState<string | null>(null);
   const id = useId();
   const text = typed ?? column.write(entry);
   const { fault } = column.read(text);
   const put = (value: string) => {
-    setTyped(value);
+    onTyped(value);
     const { part } = column.read(value);
     if (part !== null) onPart(part);
   };
   // What the stock could not take stays in the field, with what is wrong with it.
-  const settle = () => { if (typed !== null && column.read(typed).part !== null) setTyped(null); };
+  const settle = () => { if (typed !== null && column.read(typed).part !== null) onTyped(null); };
   const aria = { id, 'aria-invalid': fault !== null && text !== '', 'aria-describedby': fault === null ? undefined : `${id}-problem` };
   const options = fault?.code === 'not-an-option' ? fault.options : optionsOf(column);
   return (

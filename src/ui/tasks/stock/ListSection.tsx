@@ -15,7 +15,7 @@ export function ListSection<List extends StockList>({ view }: { readonly view: L
   const entries = useStock((state) => state.stock[view.list]) as readonly StockItem<List>[];
   const [open, setOpen] = useState<string | null>(null);
   const [importing, setImporting] = useState(false);
-  const shown = open === 'newest' ? entries.at(-1) : entries.find(({ key }) => key === open);
+  const shown = entries.find(({ key }) => key === open);
   // Nothing was said of it: it was opened by mistake.
   const close = (entry: StockItem<List>) => {
     if (view.table.columns.every((column) => column.header === 'key' || column.write(entry) === column.write(view.table.blank))) {
@@ -24,8 +24,8 @@ export function ListSection<List extends StockList>({ view }: { readonly view: L
     setOpen(null);
   };
   const add = () => {
-    room.actions.run(commands.addStock(view.list, [view.table.blank]));
-    setOpen('newest');
+    const key = room.actions.newKey();
+    if (room.actions.run(commands.addStock(view.list, [{ ...view.table.blank, key }]))) setOpen(key);
   };
   return (
     <section aria-labelledby="list-title">
@@ -38,7 +38,7 @@ export function ListSection<List extends StockList>({ view }: { readonly view: L
       {entries.length === 0
         ? <p className="hint">Nothing here yet.</p>
         : <ListTable view={view} entries={entries} onOpen={setOpen} />}
-      {shown !== undefined && <EntryDialog view={view} entry={shown} onClose={() => { close(shown); }} />}
+      {shown !== undefined && <EntryDialog key={shown.key} view={view} entry={shown} onClose={() => { close(shown); }} />}
       {importing && <ImportDialog view={view} onClose={() => { setImporting(false); }} />}
     </section>
   );

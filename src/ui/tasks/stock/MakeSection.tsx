@@ -8,6 +8,7 @@ import { useStock, useStockroom } from '../../bindings/stockroom.tsx';
 import { useActions, useWorkspaceState } from '../../bindings/workspace.tsx';
 import { VerdictMark } from '../../parts/Verdict.tsx';
 import { amountText, pressureNumber, scaleLabel, scaleOf } from '../../parts/show.ts';
+import { holdTheSame } from './same.ts';
 import { today } from './today.ts';
 
 const OBJECTIVES: Readonly<Record<ProposedAnswer['objective'], string>> = {
@@ -80,13 +81,12 @@ function Answer({ group, current, onTaken }: { readonly group: readonly Proposed
 function NotProposed({ reason }: { readonly reason: Extract<ProposedAnswer['answer'], { ok: false }>['reason'] }) {
   const { tools } = useStockroom();
   const parents = useStock((state) => state.stock.parents);
-  const barometer = useWorkspaceState((state) => (state.answer.ok ? state.answer.value.job.conditions.barometer : null));
   const nameOf = (key: string) => parents.find((parent) => parent.key === key)?.name ?? key;
   if (reason.code === 'not-planned') return <p className="problem">{reason.problems.map(recipeSentence).join(' ')}</p>;
   return (
     <>
-      {tools.impossibleSentences(reason, nameOf).map((sentence) => <p key={sentence} className="problem">{sentence}</p>)}
-      {barometer !== null && reason.setAside.map((aside) => <p key={aside.parent} className="hint">{tools.setAsideSentence(aside, barometer)}</p>)}
+      {(reason.code === 'undecided' ? [tools.undecidedSentence] : tools.impossibleSentences(reason, nameOf)).map((sentence) => <p key={sentence} className="problem">{sentence}</p>)}
+      {reason.setAside.map((aside) => <p key={aside.parent} className="hint">{tools.setAsideSentence(aside, reason.barometer)}</p>)}
     </>
   );
 }
@@ -99,7 +99,8 @@ function Proposed({ proposal, current, onTaken }: { readonly proposal: Proposal;
   const { barometer } = plan.job.conditions;
   const holds = plan.findings.filter(({ verdict }) => verdict === 'hold');
   const cautions = plan.findings.filter(({ verdict }) => verdict === 'caution').length;
-  const isTaken = inUse.length === parents.length && parents.every(({ stock }) => inUse.some((parent) => parent.stock === stock));
+  // Those that only purge are in both.
+  const isTaken = holdTheSame(inUse, proposal.recipe.parents, ['key']);
   return (
     <>
       <table className="rows narrow-table">

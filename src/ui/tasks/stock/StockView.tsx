@@ -52,7 +52,7 @@ function StockFile() {
   const input = useRef<HTMLInputElement>(null);
   return (
     <span className="saving">
-      <span role="status" className={save.kind === 'failed' ? 'save failed' : 'save'}>Stock: {saveSentence(save)}</span>
+      <span role="status" className={save.kind === 'failed' || save.kind === 'withheld' ? 'save failed' : 'save'}>Stock: {save.kind === 'withheld' ? 'Not saved: a newer program’s stock is stored here and stays as it is.' : saveSentence(save)}</span>
       <button type="button" className="plain" aria-label="Undo in the stock" disabled={undoLabel === null} title={undoLabel ?? 'nothing to undo'} onClick={() => { room.actions.undo(); }}>Undo</button>
       <button type="button" className="plain" aria-label="Redo in the stock" disabled={redoLabel === null} title={redoLabel ?? 'nothing to redo'} onClick={() => { room.actions.redo(); }}>Redo</button>
       <button type="button" className="plain" onClick={() => { handOutFile(room.actions.exportFile()); }}>Export all</button>
@@ -76,6 +76,9 @@ function Notice() {
   return (
     <p className="notice" role="status">
       {noticeSentence(notice, tools)}
+      {notice.kind === 'unreadable' && (
+        <button type="button" className="plain" onClick={() => { handOutFile({ fileName: 'stock-as-stored.txt', text: notice.text, type: 'text/plain' }); }}>Export what was stored</button>
+      )}
       <button type="button" className="plain" onClick={() => { room.actions.dismissNotice(); }}>Dismiss</button>
     </p>
   );

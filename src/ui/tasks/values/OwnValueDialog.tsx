@@ -34,7 +34,7 @@ export function OwnValueDialog({ published, own, onSet, onClose }: OwnValueDialo
       <p><strong>{quantity}{gas === null ? '' : `, ${gas}`}</strong></p>
       <p className="hint">
         Published: {published.value === null ? 'none found' : valueText(published.value, unit)} ({source}; {trust}).
-        Take the figure from the laboratory’s own copy of the document. It changes how this recipe is judged, and each check that asks for it names it.
+        Take the figure from the laboratory’s own copy of the document. It changes how this recipe is judged, and those made from now on; each check that asks for it names it.
       </p>
       <DialogField label={unit === '' ? 'value' : `value, ${unit}`} value={typed.value} problem={problemOf('value')} onChange={(value) => { setTyped({ ...typed, value }); }} />
       <DialogField label="source" value={typed.source} problem={problemOf('source')} onChange={(text) => { setTyped({ ...typed, source: text }); }} />

@@ -40,9 +40,9 @@ export default function ValuesView() {
   );
 }
 
-/** Whether two lists replace the same published values by the same figures, in whatever order. */
+/** Whether two lists replace the same published values by the same figures from the same place, in whatever order. */
 function sameValues(own: readonly LaboratoryValue[], kept: readonly LaboratoryValue[]): boolean {
-  return own.length === kept.length && own.every((value) => kept.some(({ id, value: figure }) => id === value.id && figure === value.value));
+  return own.length === kept.length && own.every((value) => kept.some((other) => other.id === value.id && other.value === value.value && other.source === value.source && other.date === value.date));
 }
 
 type Loaded = readonly ListedValue[] | 'loading' | 'failed';

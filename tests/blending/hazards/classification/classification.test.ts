@@ -104,6 +104,9 @@ describe('statements of the Globally Harmonized System', () => {
   it('H232 above 1 % of a gas that lights by itself', () => {
     expect(statements({ silane: 0.0101, nitrogen: 0.9899 })).toContain('H232');
     expect(statements({ silane: 0.0099, nitrogen: 0.9901 })).not.toContain('H232');
+    // At worst within ±10 % there is 1.045 % of it.
+    const { planned, worst } = classOf({ silane: 0.0095, nitrogen: 0.9905 }, { tolerance: { silane: 0.1 } });
+    expect([planned, worst].map((each) => each.statements.some(({ code }) => code === 'H232'))).toEqual([false, true]);
   });
 
   it.each([[100, 'H330', 'H330'], [500, 'H330', 'H331'], [2500, 'H331', 'H332'], [20_000, 'H332', null]] as const)(

@@ -71,6 +71,13 @@ describe(rule, () => {
       additions: [['no', 1], ['n2', 99]], unordered: ['oxygen'],
     });
 
+    it('a limit of detection counts in full: O₂ < 1800 µmol/mol holds as 1800 does, < 990 does not', () => {
+      // The fixture carries half of a limit, as a recipe does; 1000 µmol/mol is the most of an impurity (own choice).
+      expect(findingsOf(rule, belowLimit(nitricOxide(900e-6), 'n2', 'oxygen')).map(({ verdict }) => verdict)).toContain('hold');
+      expect(findingsOf(rule, nitricOxide(1800e-6)).map(({ verdict }) => verdict)).toContain('hold');
+      expect(findingsOf(rule, belowLimit(nitricOxide(495e-6), 'n2', 'oxygen')).map(({ verdict }) => verdict)).not.toContain('hold');
+    });
+
     it('NO 50 µmol/mol in nitrogen with O₂ < 3 µmol/mol: a caution with the share it can consume', () => {
       // The plan counts half of the limit, 1.5 µmol/mol; in full 99 % of 3 µmol/mol consume 2 × 2.97/50 = 11.9 % of the NO.
       const [found, ...more] = findingsOf(rule, belowLimit(nitricOxide(1.5e-6), 'n2', 'oxygen'));

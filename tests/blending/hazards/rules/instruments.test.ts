@@ -26,6 +26,15 @@ describe('gauge-too-coarse', () => {
     expect(verdictsOf(rule, fill(7.23, { gauges }))).toEqual({});
   });
 
+  it('holds a premix against the tolerance of the gas it is there for, not of its balance', () => {
+    // 15 bar of 1 % carbon monoxide in nitrogen on 0.3608 bar: known to 2.4 %, ordered to 1 %.
+    const plan = planFixture({
+      parents: { premix: { mix: { 'carbon monoxide': 0.01, nitrogen: 0.99 } }, nitrogen: { mix: { nitrogen: 1 } } },
+      additions: [['premix', 15], ['nitrogen', 135]], tolerance: { 'carbon monoxide': 0.01 }, gauges: [gaugeFixture({ resolution: 0 })],
+    });
+    expect(verdictsOf(rule, plan)).toMatchObject({ [`${rule}:step-1`]: 'hold' });
+  });
+
   it('counts the resolution of both readings', () => {
     expect(verdictsOf(rule, fill(7.23, { gauges: [gaugeFixture({ resolution: 1e5 })] }))).toEqual({ [`${rule}:step-1`]: 'caution' });
   });
@@ -113,6 +122,18 @@ describe('supply-pressure', () => {
     }));
     expect(low(0.9)).toEqual({ [`${rule}:parent-carbon`]: 'caution' });
     expect(low(1.1)).toEqual({});
+  });
+
+  it('asks for the inlet where a booster carries the gas up to its stop', () => {
+    const boosted = (pressure: number, gas: 'argon' | 'carbon dioxide' = 'argon'): unknown => {
+      const plan = planFixture({ parents: { second: { mix: { [gas]: 1 }, pressure }, nitrogen: { mix: { nitrogen: 1 } } }, additions: [['nitrogen', 80], ['second', 20]] });
+      return verdictsOf(rule, { ...plan, job: { ...plan.job, batch: { ...plan.job.batch, boosterInlet: bar(10) } } });
+    };
+    expect(boosted(80)).toEqual({});
+    expect(boosted(11.9)).toEqual({ [`${rule}:parent-second`]: 'caution' });
+    expect(boosted(9.9)).toEqual({ [`${rule}:parent-second`]: 'hold' });
+    // Published (NIST): vapour pressure of CO2 at 20 °C 57.3 bar; compressed to 100 bar it is a liquid.
+    expect(boosted(50, 'carbon dioxide')).toEqual({ [`${rule}:parent-second`]: 'hold' });
   });
 
   it('counts against the plan when it is not stated', () => {

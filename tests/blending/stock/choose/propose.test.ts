@@ -157,6 +157,37 @@ describe('a parent whose pressure does not suffice', () => {
     expect(proven).toBe(true);
   });
 
+  it('is not proposed however many of them stand on the rack, each a little different', () => {
+    const lean = orderOf({ order: [['O2', '10 %'], ['N2', 'balance']], to: '125 bar' });
+    // Each holds some 290 mol and would have to give 45 of them: it ends near 119 bar, below the stop.
+    const many = Array.from({ length: 12 }, (_, k) => onRack(`n${String(k)}`, [['N2', '100 %']], `${String(141 + 0.1 * k)} bar`));
+    // The higher ones hold less, so that no one says it of all others.
+    const mixed = many.map((each, k) => ({ ...each, waterCapacity: `${String(50 - k)} L` }));
+    for (const stock of [rack(...many, o2), rack(...mixed, o2)]) {
+      for (const { answer } of valueOf(proposeFromStock(lean, stock, today)).answers) {
+        const reason = answer.ok ? null : answer.reason;
+        if (reason?.code !== 'impossible') throw new Error('it was proposed');
+        expect(reason.shortage).toMatchObject({ code: 'not-enough-gas' });
+        // One that could not give so much were it opened first is not tried at all.
+        expect(reason.setAside.length).toBeGreaterThan(8);
+        expect(new Set(reason.setAside.map(({ parent }) => parent)).size).toBe(reason.setAside.length);
+        expect(new Set(reason.setAside.map(({ code }) => code))).toEqual(new Set(['runs-out']));
+      }
+    }
+  });
+
+  it('is set aside although the recipe keeps it to purge with, and the choice comes to an end', () => {
+    const weak = onRack('weak', [['N2', '100 %']], '141 bar');
+    const absolute = (typed: string) => ({ typed, reference: 'absolute' }) as const;
+    const lean = orderOf({ order: [['O2', '10 %'], ['N2', 'balance']], to: '125 bar', contents: residual('2 bar', [['N2', '100 %']]) });
+    const purged = {
+      ...lean, parents: [parentFromStock(weak, 'p1')],
+      conditioning: [{ kind: 'purge', parent: 'p1', low: absolute('1 mbar'), high: absolute('2 bar'), cycles: '2', wanted: '' }],
+    } as const;
+    const [first] = valueOf(proposeFromStock(purged, rack(weak, o2), today, ['least gas'])).answers;
+    expect(first!.answer).toMatchObject({ ok: false, reason: { code: 'impossible', setAside: [{ parent: 'weak', code: 'runs-out' }] } });
+  });
+
   it('serves all the same with a booster', () => {
     const boosted = { ...order, batch: { ...order.batch, boosterInlet: { typed: '10 bar', reference: 'absolute' as const } } };
     const proposal = proposed(boosted, rack(low, high, co), 'least gas');

@@ -5,15 +5,18 @@ import {
 import type { Delimiter, TableProblem } from '../../../../src/blending/stock/tools.ts';
 
 const delimiters: readonly Delimiter[] = [',', ';', '\t'];
+/** A reading in which nothing is wrong and nothing is left. */
+const whole = <Entry extends { readonly key: string }>(entries: readonly Entry[]) =>
+  ({ entries, problems: [], unread: [], statedKeys: entries.map(({ key }) => key), rest: '' });
 
 describe('the tables of the demo stock', () => {
   it.each(delimiters)('come back as they were written, with %j between', (delimiter) => {
-    expect(readTable(parentTable, writeTable(parentTable, demoStock.parents, delimiter))).toEqual({ entries: demoStock.parents, problems: [], unread: [] });
-    expect(readTable(cylinderTable, writeTable(cylinderTable, demoStock.cylinders, delimiter))).toEqual({ entries: demoStock.cylinders, problems: [], unread: [] });
-    expect(readTable(gaugeTable, writeTable(gaugeTable, demoStock.gauges, delimiter))).toEqual({ entries: demoStock.gauges, problems: [], unread: [] });
+    expect(readTable(parentTable, writeTable(parentTable, demoStock.parents, delimiter))).toEqual(whole(demoStock.parents));
+    expect(readTable(cylinderTable, writeTable(cylinderTable, demoStock.cylinders, delimiter))).toEqual(whole(demoStock.cylinders));
+    expect(readTable(gaugeTable, writeTable(gaugeTable, demoStock.gauges, delimiter))).toEqual(whole(demoStock.gauges));
     expect(readTable(thermometerTable, writeTable(thermometerTable, demoStock.thermometers, delimiter)))
-      .toEqual({ entries: demoStock.thermometers, problems: [], unread: [] });
-    expect(readTable(balanceTable, writeTable(balanceTable, demoStock.balances, delimiter))).toEqual({ entries: demoStock.balances, problems: [], unread: [] });
+      .toEqual(whole(demoStock.thermometers));
+    expect(readTable(balanceTable, writeTable(balanceTable, demoStock.balances, delimiter))).toEqual(whole(demoStock.balances));
   });
 
   it('begin with a byte-order mark and our own heads', () => {
@@ -96,6 +99,27 @@ describe('reading a table', () => {
     expect(open.entries.map(({ name }) => name)).toEqual(['N2']);
     expect(codes(open.problems)).toContain('quotes-open');
     expect(open.unread).toHaveLength(1);
+  });
+
+  it('hands back what it did not take, to be mended and read again', () => {
+    const text = 'key;cylinder;material;water capacity\na;A;steel;10 L\nb;"B; new";wood;10 L\nc;"C;steel;10 L';
+    const { rest, statedKeys, entries } = readTable(cylinderTable, text);
+    expect(entries.map(({ id }) => id)).toEqual(['A']);
+    expect(statedKeys).toEqual(['a']);
+    const again = readTable(cylinderTable, rest.replace('wood', 'steel'));
+    expect(again.entries.map(({ key, id }) => [key, id])).toEqual([['b', 'B; new']]);
+    expect(again.problems.map(({ code }) => code)).toEqual(['quotes-open']);
+    // A key made of a name is not one that the table states.
+    expect(readTable(parentTable, 'name,pressure\nN2,200 bar').statedKeys).toEqual([]);
+  });
+
+  it('says what is wrong with a full scale, and with an accuracy in kelvins', () => {
+    const fault = (columns: typeof gaugeTable.columns | typeof thermometerTable.columns, header: string, text: string) =>
+      columns.find((column) => column.header === header)!.read(text).fault;
+    expect(fault(gaugeTable.columns, 'full scale', 'abc')).toMatchObject({ code: 'entry', problem: { code: 'not-a-number' } });
+    for (const text of ['3000 psi', '16', '250 bar']) expect(fault(gaugeTable.columns, 'full scale', text)).toBeNull();
+    for (const text of ['x1 nonsense K', '0.2', '0.2 bar', '-1 K']) expect(fault(thermometerTable.columns, 'accuracy', text)).toMatchObject({ code: 'entry' });
+    for (const text of ['0.2 K', '0,2 °C']) expect(fault(thermometerTable.columns, 'accuracy', text)).toBeNull();
   });
 
   it('keeps a cell from being run as a formula, and reads it back', () => {
