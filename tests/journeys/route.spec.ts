@@ -130,7 +130,7 @@ test('a residual in the way is purged away, counted, and printed', async ({ page
   await test.step('by hand: three cycles, and what they leave by the rule', async () => {
     await conditioning.getByRole('button', { name: 'Add purge cycles' }).click();
     await conditioning.getByLabel('up to', { exact: true }).fill('4 bar');
-    await conditioning.getByLabel('down to', { exact: true }).fill('1 bar');
+    await conditioning.getByLabel('first and each time down to', { exact: true }).fill('1 bar');
     // A quarter, three times: 1/64.
     await expect(conditioning.locator('.result-line')).toContainText('After 3 cycles');
     await expect(conditioning.locator('.result-line')).toContainText('By the rule (1.000 / 4.000)³ = 1.56 %');
@@ -154,7 +154,7 @@ test('a residual in the way is purged away, counted, and printed', async ({ page
     await conditioning.getByLabel('what is done').fill('bake at 60 °C for 4 h');
     const paper = await print(page, 'A4', info);
     await expectWholeSheet(page, paper);
-    expect(paper.text).toContain('Purge with N₂ 5.0: up to 4.00 bar absolute, down to 1.00 bar absolute, 7 times; 61 µmol/mol of the gas is then the old gas.');
+    expect(paper.text).toContain('Go down to 1.00 bar absolute; then purge with N₂ 5.0: up to 4.00 bar absolute, down to 1.00 bar absolute, 7 times; 61 µmol/mol of the gas is then the old gas.');
     expect(paper.text).toContain('bake at 60 °C for 4 h');
   });
 
