@@ -2,6 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { demoRecipes, planRecipe, recipeSentence } from '../../src/blending/index.ts';
 import { explainComponent, explainIdealStop, explainMass, explainStop } from '../../src/blending/working/explain.ts';
+import { triangleOf } from '../../src/blending/picture/triangle.ts';
+import { supplyOf } from '../../src/blending/supply/index.ts';
 import type { PlanAnswer, Recipe } from '../../src/blending/index.ts';
 
 /** Texts that people, other programs and accidents put into fields. */
@@ -18,7 +20,7 @@ const text = fc.oneof(
 function textPaths(value: unknown, path: readonly (string | number)[] = []): (readonly (string | number)[])[] {
   if (typeof value === 'string') {
     const name = String(path.at(-1));
-    return ['reference', 'material', 'state', 'by', 'sequence', 'standardPressure'].includes(name) ? [] : [path];
+    return ['reference', 'material', 'state', 'by', 'sequence', 'standardPressure', 'kind', 'basis', 'filling', 'accuracyOf'].includes(name) ? [] : [path];
   }
   if (typeof value !== 'object' || value === null) return [];
   return Object.entries(value).flatMap(([key, each]) => textPaths(each, [...path, key]));
@@ -56,12 +58,32 @@ function expectAnswer(answer: PlanAnswer): void {
     return;
   }
   const plan = answer.value;
+  expectFinite(supplyOf(plan), 'supply');
+  expectFinite(triangleOf(plan), 'triangle');
   for (const step of plan.steps) for (const explain of [explainStop, explainMass, explainIdealStop]) expectFinite(explain(plan, step), 'working');
   for (const component of plan.final.components) expectFinite(explainComponent(plan, component), 'working');
 }
 
+/** Everything that a recipe can say beside what the demo recipes say: conditioning, a split, a batch, own values. */
+const [blend] = demoRecipes.slice(-1) as [Recipe];
+const full: Recipe = {
+  ...blend,
+  cylinder: {
+    ...blend.cylinder,
+    contents: { ...blend.cylinder.contents, state: 'residual', pressure: { typed: '3 bar', reference: 'absolute' }, composition: [{ gas: 'O₂', amount: '21 %' }, { gas: 'N₂', amount: '79 %' }] },
+  },
+  conditioning: [
+    { kind: 'lower', to: { typed: '1.5 bar', reference: 'absolute' } },
+    { kind: 'purge', parent: 'n2', low: { typed: '1.1 bar', reference: 'absolute' }, high: { typed: '5 bar', reference: 'absolute' }, cycles: '', wanted: '100 µmol/mol' },
+    { kind: 'free', text: 'bake at 60 °C' },
+  ],
+  route: { ...blend.route, sequence: 'as listed', split: { parent: 'n2', share: '50 %', before: 'o2' } },
+  batch: { cylinders: '4', together: true, boosterInlet: { typed: '10 bar', reference: 'gauge' } },
+  values: [{ id: 'lfl:methane', value: '4.2', source: 'own copy', date: '2026-11-30' }],
+};
+
 describe('whatever stands in the fields', () => {
-  const paths = demoRecipes.flatMap((recipe) => textPaths(recipe).map((path) => ({ recipe, path })));
+  const paths = [...demoRecipes, full].flatMap((recipe) => textPaths(recipe).map((path) => ({ recipe, path })));
 
   it('one field at a time, of every demo recipe: a plan or problems, never an exception or a number that is none', () => {
     fc.assert(fc.property(fc.constantFrom(...paths), text, ({ recipe, path }, typed) => {
@@ -78,4 +100,13 @@ describe('whatever stands in the fields', () => {
       },
     ), { numRuns: 150, seed: 2008 });
   }, 30_000);
+
+  it('conditioning, split, batch and own values: each field in turn takes every text of the list', () => {
+    // Not NaN: what no rule knows is repeated as it was typed.
+    const typed = ['', '0', '-1', '1e308', '150', '1e15 bar', '1e-12 mbar', '1 kPa', '100 %', '99.9999 %', 'balance', '__proto__', '💥'];
+    expect(planRecipe(full).ok).toBe(true);
+    for (const path of textPaths({ conditioning: full.conditioning, route: full.route, batch: full.batch, values: full.values })) {
+      for (const each of typed) expectAnswer(planRecipe(replaced<Recipe>(full, path, each)));
+    }
+  }, 60_000);
 });

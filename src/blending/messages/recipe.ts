@@ -39,6 +39,8 @@ export function recipeSentence(problem: RecipeProblem): string {
       return `“${problem.text.trim()}” is more than a number: the unit is that of the published value.`;
     case 'value-beyond':
       return `The value must lie between ${String(problem.lowest)} and ${String(problem.highest)}.`;
+    case 'room-unlikely':
+      return `The room temperature must lie between ${formatTemperature(problem.lowest)} and ${formatTemperature(problem.highest)}: look at its number and its unit.`;
     case 'no-parents':
       return 'Enter the parent gases to fill from, or let Stock, “What can be made”, choose them.';
     case 'not-a-day':

@@ -9,6 +9,10 @@ import type { FieldReader } from './reader.ts';
 /** Stands where a temperature could not be read; never used, since such a recipe is not planned. */
 export const STAND_IN_TEMPERATURE = fromCelsius(20);
 
+/** Air temperatures taken as possible where somebody works (our own choice). */
+const COLDEST_ROOM = fromCelsius(-40);
+const HOTTEST_ROOM = fromCelsius(60);
+
 /** One gauge in SI: a gauge starts at zero of its own reference, so its span is its full-scale reading. */
 export function readGauge(reader: FieldReader, text: Gauge): JobGauge {
   const field = `gauges.${text.key}`;
@@ -41,9 +45,13 @@ export function readConditions(reader: FieldReader, text: Conditions): JobCondit
   reader.positive('conditions.concentrationPressure', concentrationPressure);
   const roomVolume = reader.optional('conditions.roomVolume', text.roomVolume, parseVolume);
   if (roomVolume !== null) reader.positive('conditions.roomVolume', roomVolume);
+  const roomTemperature = reader.read('conditions.roomTemperature', parseTemperature(text.roomTemperature), STAND_IN_TEMPERATURE);
+  if (!(roomTemperature >= COLDEST_ROOM && roomTemperature <= HOTTEST_ROOM)) {
+    reader.problems.push({ code: 'room-unlikely', field: 'conditions.roomTemperature', lowest: COLDEST_ROOM, highest: HOTTEST_ROOM });
+  }
   return {
     barometer: reader.barometer,
-    roomTemperature: reader.read('conditions.roomTemperature', parseTemperature(text.roomTemperature), STAND_IN_TEMPERATURE),
+    roomTemperature,
     relativeHumidity: reader.read('conditions.relativeHumidity', parseHumidity(text.relativeHumidity), 0),
     roomVolume,
     coldestStorage: reader.optional('conditions.coldestStorage', text.coldestStorage, parseTemperature),

@@ -1,4 +1,4 @@
-import type { EntryProblem, Pascal } from '../../units/index.ts';
+import type { EntryProblem, Kelvin, Pascal } from '../../units/index.ts';
 import type { GasId, ThermoReason } from '../../thermo/index.ts';
 
 /**
@@ -27,6 +27,8 @@ export type RecipeProblem =
   | { readonly code: 'not-positive'; readonly field: FieldPath }
   /** No weather and no laboratory has such an air pressure; a slip of the unit does. Bounds absolute. */
   | { readonly code: 'barometer-unlikely'; readonly field: FieldPath; readonly lowest: Pascal; readonly highest: Pascal }
+  /** No room where one works is so cold or so hot, and the formula for the air knows none. */
+  | { readonly code: 'room-unlikely'; readonly field: FieldPath; readonly lowest: Kelvin; readonly highest: Kelvin }
   | { readonly code: 'no-parents'; readonly field: FieldPath }
   /** An own value of the laboratory without its source or its date. */
   | { readonly code: 'origin-missing'; readonly field: FieldPath }

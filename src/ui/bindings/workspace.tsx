@@ -29,8 +29,3 @@ export function useWorkspaceState<Part>(selector: (state: AppState) => Part): Pa
 export function useActions(): WorkspaceActions {
   return useWorkspace().actions;
 }
-
-/** The store itself, for handlers that read the state at the moment they run. */
-export function useWorkspaceStore(): AppWorkspace['store'] {
-  return useWorkspace().store;
-}

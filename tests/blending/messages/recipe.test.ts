@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { mixingSentence, recipeSentence, thermoSentence } from '../../../src/blending/index.ts';
 import type { RecipeProblem } from '../../../src/blending/index.ts';
 import type { ThermoReason } from '../../../src/thermo/index.ts';
-import { pascal } from '../../../src/units/index.ts';
+import { kelvin, pascal } from '../../../src/units/index.ts';
 import { expectSentence } from './sentences.ts';
 
 const field = 'order';
@@ -43,6 +43,7 @@ const problems: { readonly [Code in RecipeProblem['code']]: Extract<RecipeProble
   'limit-in-order': { code: 'limit-in-order', field },
   'not-positive': { code: 'not-positive', field },
   'barometer-unlikely': { code: 'barometer-unlikely', field, lowest: pascal(5e4), highest: pascal(1.1e5) },
+  'room-unlikely': { code: 'room-unlikely', field, lowest: kelvin(233.15), highest: kelvin(333.15) },
   'no-parents': { code: 'no-parents', field },
   'origin-missing': { code: 'origin-missing', field },
   'number-alone': { code: 'number-alone', field, text: '4.4 %' },

@@ -42,7 +42,7 @@ interface StudyProps {
 
 function Study({ recipe, answer, current }: StudyProps) {
   const actions = useActions();
-  const { costText, criterionText, orderText, whySentence } = useRouteTools();
+  const { costText, criterionText, differenceOf, orderText, whySentence } = useRouteTools();
   const { job, study, own } = answer;
   const { counts } = study;
   const take = (list: readonly ListedAddition[]) => {
@@ -53,13 +53,13 @@ function Study({ recipe, answer, current }: StudyProps) {
   const ownList = listed(job, own.arrangement);
   const isBest = CRITERIA.every((criterion) => own.cost[criterion] <= study.chosen.cost[criterion]);
   const held = study.chosen.cost.holds > 0;
-  const decided = CRITERIA.find((criterion) => own.cost[criterion] !== study.chosen.cost[criterion]);
+  const { criterion: decided } = differenceOf(own.cost, study.chosen.cost);
   return (
     <>
       <p role="status" className={held ? 'problem' : undefined}>
         {isBest
           ? <>This is the best of {counts.orders.toLocaleString('en-GB')} order{counts.orders === 1 ? '' : 's'}{held ? ', and it is held: no order is clean' : ''}. {whySentence(job, study.why, study.chosen.cost)}</>
-          : <>A better order is known: <b>{orderText(job, study.chosen.arrangement)}</b>. {decided !== undefined && `It is better by ${criterionText[decided]}: ${costText(decided, study.chosen.cost)} against ${costText(decided, own.cost)}.`}</>}
+          : <>A better order is known: <b>{orderText(job, study.chosen.arrangement)}</b>. {decided !== null && `It is better by ${criterionText[decided]}: ${costText(decided, study.chosen.cost)} against ${costText(decided, own.cost)}.`}</>}
       </p>
       <p className="dialog-actions">
         {!isBest && <button type="button" className="strong-button" disabled={!current} onClick={() => { take(listed(job, study.chosen.arrangement)); }}>Use the best order</button>}
